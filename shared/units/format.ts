@@ -1,0 +1,71 @@
+const prefixes: Record<number, string> = {
+  [-18]: 'a', [-15]: 'f', [-12]: 'p', [-9]: 'n', [-6]: 'µ', [-3]: 'm', 0: '', 3: 'k', 6: 'M', 9: 'G', 12: 'T',
+}
+
+/** Thin space between number and unit; a true minus sign before negative numbers. */
+export const thinSpace = '\u2009'
+const minusSign = '\u2212'
+
+export interface FormatOptions {
+  /** Significant digits, 4 unless told. */
+  digits?: number
+  /** Always show a sign, `+` included. */
+  signed?: boolean
+}
+
+/** The parts of a formatted quantity, for places that set number and unit in different type. */
+export interface QuantityParts {
+  number: string
+  /** SI prefix and unit, `kHz`; empty for a pure number. */
+  unit: string
+}
+
+function withSign(text: string, signed: boolean): string {
+  if (text.startsWith('-')) return minusSign + text.slice(1)
+  return signed ? `+${text}` : text
+}
+
+/** Rounds to `digits` significant digits without exponent and without trailing zeros after the point. */
+function plain(value: number, digits: number): string {
+  const text = Number(value.toPrecision(digits)).toString()
+  return text.includes('e') ? value.toExponential(digits - 1) : text
+}
+
+/** A value in SI units as engineering number and prefixed unit: 989.69 Hz, 2.2 kΩ, −1.5 mV. */
+export function quantityParts(value: number, unit: string, options: FormatOptions = {}): QuantityParts {
+  const { digits = 4, signed = false } = options
+  if (Number.isNaN(value)) return { number: '–', unit }
+  if (!Number.isFinite(value)) return { number: withSign(value < 0 ? '-∞' : '∞', signed), unit }
+  if (value === 0) return { number: '0', unit }
+  const rounded = Number(value.toPrecision(digits))
+  const exponent = Math.min(12, Math.max(-18, Math.floor(Math.log10(Math.abs(rounded)) / 3 + 1e-12) * 3))
+  return {
+    number: withSign(plain(rounded / 10 ** exponent, digits), signed),
+    unit: `${prefixes[exponent] ?? ''}${unit}`,
+  }
+}
+
+/** Number, thin space, prefixed unit. */
+export function formatQuantity(value: number, unit: string, options?: FormatOptions): string {
+  const parts = quantityParts(value, unit, options)
+  return parts.unit ? `${parts.number}${thinSpace}${parts.unit}` : parts.number
+}
+
+/** A pure ratio in per cent: 0.01375 → `1.375 %`. */
+export function formatPercent(ratio: number, options: FormatOptions = {}): string {
+  const { digits = 4, signed = false } = options
+  if (!Number.isFinite(ratio)) return '–'
+  return `${withSign(plain(ratio * 100, digits), signed)}${thinSpace}%`
+}
+
+/** A pure number with a true minus sign. */
+export function formatNumber(value: number, options: FormatOptions = {}): string {
+  const { digits = 4, signed = false } = options
+  return Number.isFinite(value) ? withSign(plain(value, digits), signed) : '–'
+}
+
+/** A value as an engineer types it into a field: `4k7` style is accepted there, this writes `4.7k`. */
+export function formatInput(value: number, digits = 6): string {
+  const parts = quantityParts(value, '', { digits })
+  return `${parts.number.replace(minusSign, '-')}${parts.unit.replace('µ', 'u')}`
+}

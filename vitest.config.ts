@@ -11,7 +11,10 @@ export default defineConfig({
         test: {
           name: 'node',
           environment: 'node',
-          include: ['tests/{sim,server,shared,reference,support}/**/*.test.ts', 'tests/client/**/*.node.test.ts'],
+          include: [
+            'tests/{sim,server,shared,reference,support}/**/*.test.ts',
+            'tests/client/**/*.node.test.ts',
+          ],
           testTimeout: 30_000,
         },
       },

@@ -40,10 +40,15 @@ export const supplySchema = z
     negative: quantity('Negative supply', 'V', limits.supplyVoltage),
     reference: quantity('Reference', 'V', limits.supplyVoltage).optional(),
   })
-  .refine((supply) => supply.reference === undefined || Math.abs(supply.reference - supply.negative) <= 1e-9 * supply.negative, {
-    path: ['reference'],
-    error: 'On a single supply the negative rail lies one reference voltage below the reference.',
-  })
+  .refine(
+    (supply) =>
+      supply.reference === undefined ||
+      Math.abs(supply.reference - supply.negative) <= 1e-9 * supply.negative,
+    {
+      path: ['reference'],
+      error: 'On a single supply the negative rail lies one reference voltage below the reference.',
+    },
+  )
 
 /** What holds the level. `none`: the rails clip. Laws and symbols: `sim/circuit/`. */
 export const amplitudeControlSchema = z.discriminatedUnion('kind', [
@@ -87,9 +92,15 @@ export const circuitSchema = z
     const { amplifier, supply, gain, amplitudeControl: control } = circuit
     const refuse = (path: string[], message: string) => context.addIssue({ code: 'custom', path, message })
     if (supply.positive <= amplifier.headroomHigh)
-      refuse(['supply', 'positive'], 'The positive supply must exceed the upper headroom, or the output cannot move.')
+      refuse(
+        ['supply', 'positive'],
+        'The positive supply must exceed the upper headroom, or the output cannot move.',
+      )
     if (supply.negative <= amplifier.headroomLow)
-      refuse(['supply', 'negative'], 'The negative supply must exceed the lower headroom, or the output cannot move.')
+      refuse(
+        ['supply', 'negative'],
+        'The negative supply must exceed the lower headroom, or the output cannot move.',
+      )
     if (control.kind === 'diodes' && !same(gain.feedbackR, control.seriesR + control.shuntedR))
       refuse(['gain', 'feedbackR'], 'Feedback R must be the sum of its two parts around the diodes.')
     if (control.kind === 'lamp' && !same(gain.groundR, control.coldR))

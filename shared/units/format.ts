@@ -1,5 +1,15 @@
 const prefixes: Record<number, string> = {
-  [-18]: 'a', [-15]: 'f', [-12]: 'p', [-9]: 'n', [-6]: 'µ', [-3]: 'm', 0: '', 3: 'k', 6: 'M', 9: 'G', 12: 'T',
+  [-18]: 'a',
+  [-15]: 'f',
+  [-12]: 'p',
+  [-9]: 'n',
+  [-6]: 'µ',
+  [-3]: 'm',
+  0: '',
+  3: 'k',
+  6: 'M',
+  9: 'G',
+  12: 'T',
 }
 
 /** Thin space between number and unit; a true minus sign before negative numbers. */

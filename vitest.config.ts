@@ -12,7 +12,7 @@ export default defineConfig({
           name: 'node',
           environment: 'node',
           include: [
-            'tests/{sim,server,shared,reference,support}/**/*.test.ts',
+            'tests/{sim,server,shared,reference,support,lint}/**/*.test.ts',
             'tests/client/**/*.node.test.ts',
           ],
           testTimeout: 30_000,

@@ -1,0 +1,18 @@
+/** Bundles the server: the process, its worker thread and the admin command, every package left outside. */
+import { build } from 'esbuild'
+
+await build({
+  entryPoints: {
+    main: 'server/main.ts',
+    worker: 'server/compute/worker.ts',
+    'create-admin': 'server/create-admin.ts',
+  },
+  outdir: 'dist/server',
+  bundle: true,
+  packages: 'external',
+  platform: 'node',
+  format: 'esm',
+  target: 'node20',
+  sourcemap: true,
+  logLevel: 'warning',
+})

@@ -1,0 +1,60 @@
+/** Runs on the server: what the pages read, and the two requests that change something. */
+import { keepPreviousData, mutationOptions, queryOptions, type QueryClient } from '@tanstack/react-query'
+import { api } from '#client/lib/api.ts'
+import { decodeColumns } from '#shared/record-codec.ts'
+import type { DesignSummary } from '#shared/schemas/design.ts'
+import type { Page } from '#shared/schemas/paging.ts'
+import type { CreateRun, ListRuns, Run, RunSummary } from '#shared/schemas/run.ts'
+
+export const runQueries = {
+  all: () => ['runs'] as const,
+  lists: () => [...runQueries.all(), 'list'] as const,
+  list: (query: Partial<ListRuns>) =>
+    queryOptions({
+      queryKey: [...runQueries.lists(), query],
+      queryFn: ({ signal }) => api.get<Page<RunSummary>>('/runs', { signal, query }),
+      placeholderData: keepPreviousData,
+    }),
+  detail: (id: number) =>
+    queryOptions({
+      queryKey: [...runQueries.all(), 'detail', id],
+      queryFn: ({ signal }) => api.get<Run>(`/runs/${id}`, { signal }),
+    }),
+  /** The record's columns, as `run.record.columns` names them. A record never changes once stored. */
+  record: (id: number, columns: number) =>
+    queryOptions({
+      queryKey: [...runQueries.all(), 'record', id, columns],
+      queryFn: async ({ signal }) =>
+        decodeColumns(await api.bytes(`/runs/${id}/record`, { signal }), columns),
+      staleTime: Infinity,
+    }),
+  /** Designs to filter by. */
+  designs: () =>
+    queryOptions({
+      queryKey: [...runQueries.all(), 'designs'],
+      queryFn: ({ signal }) =>
+        api.get<Page<DesignSummary>>('/designs', {
+          signal,
+          query: { sort: 'name', order: 'asc', pageSize: 100 },
+        }),
+    }),
+}
+
+export const runMutations = {
+  save: (client: QueryClient) =>
+    mutationOptions({
+      mutationFn: (body: CreateRun) => api.post<Run>('/runs', body),
+      onSuccess: async (run) => {
+        client.setQueryData(runQueries.detail(run.id).queryKey, run)
+        await client.invalidateQueries({ queryKey: runQueries.lists() })
+      },
+    }),
+  remove: (client: QueryClient) =>
+    mutationOptions({
+      mutationFn: (id: number) => api.delete<void>(`/runs/${id}`),
+      onSuccess: () => client.invalidateQueries({ queryKey: runQueries.lists() }),
+    }),
+}
+
+/** Where the browser fetches a run's record as CSV. */
+export const exportUrl = (id: number) => `/api/runs/${id}/export.csv`

@@ -13,6 +13,8 @@ export interface RecordGrid {
 export interface RecordResult {
   simulation: Simulation
   grid: RecordGrid
+  /** `engineVersion` of `sim/index.ts`, as it stands in the worker that computed the record. */
+  engineVersion: string
 }
 
 export interface RunOptions {

@@ -1,0 +1,116 @@
+import { randomBytes } from 'node:crypto'
+import { chmodSync, existsSync, mkdirSync, readFileSync, writeFileSync } from 'node:fs'
+import { dirname, join, resolve } from 'node:path'
+import { z } from 'zod'
+import { isLoopbackName } from '#server/http/loopback.ts'
+import { projectRoot } from '#server/root.ts'
+import { StartError } from '#server/start-error.ts'
+
+const secretLength = 32
+
+const environmentSchema = z.object({
+  NODE_ENV: z.string().default('demo'),
+  HOST: z
+    .string()
+    .trim()
+    .min(1, { error: 'HOST is empty: leave it out or name an address.' })
+    .default('127.0.0.1'),
+  PORT: z.coerce
+    .number({ error: 'PORT must be a whole number from 0 to 65535.' })
+    .int({ error: 'PORT must be a whole number from 0 to 65535.' })
+    .min(0, { error: 'PORT must be a whole number from 0 to 65535.' })
+    .max(65535, { error: 'PORT must be a whole number from 0 to 65535.' })
+    .default(4173),
+  DATABASE_FILE: z
+    .string()
+    .trim()
+    .min(1, { error: 'DATABASE_FILE is empty: leave it out or name a file.' })
+    .default('data/sinewright.sqlite'),
+  SESSION_SECRET: z.string().optional(),
+  LOG_LEVEL: z
+    .enum(['fatal', 'error', 'warn', 'info', 'debug', 'trace', 'silent'], {
+      error: 'LOG_LEVEL must be one of fatal, error, warn, info, debug, trace, silent.',
+    })
+    .default('info'),
+  TRUST_PROXY: z.coerce
+    .number({ error: 'TRUST_PROXY must be the number of proxies in front, 0 to 10.' })
+    .int({ error: 'TRUST_PROXY must be the number of proxies in front, 0 to 10.' })
+    .min(0, { error: 'TRUST_PROXY must be the number of proxies in front, 0 to 10.' })
+    .max(10, { error: 'TRUST_PROXY must be the number of proxies in front, 0 to 10.' })
+    .default(0),
+})
+
+/** Everything that the environment decides, read once at the start of the process. */
+export interface Config {
+  /** `demo`: loopback only, invented data, demo accounts. */
+  mode: 'demo' | 'production'
+  host: string
+  port: number
+  /** Absolute path. */
+  databaseFile: string
+  sessionSecret: string
+  logLevel: z.infer<typeof environmentSchema>['LOG_LEVEL']
+  /** Proxies in front whose X-Forwarded-* headers are believed. */
+  trustProxy: number
+  /** Folder of the built client. */
+  clientDirectory: string
+  /** bcrypt cost: 2^cost rounds. */
+  bcryptCost: number
+  /** Requests that one address may make. */
+  rates: { failedSignInsPerQuarterHour: number; requestsPerMinute: number }
+}
+
+/**
+ * Environment → configuration.
+ * @throws StartError with a sentence for each variable that cannot be used
+ */
+export function readConfig(environment: NodeJS.ProcessEnv): Config {
+  const parsed = environmentSchema.safeParse(environment)
+  if (!parsed.success) throw new StartError(parsed.error.issues.map((issue) => issue.message).join(' '))
+  const { data } = parsed
+  const mode = data.NODE_ENV === 'production' ? 'production' : 'demo'
+  if (mode === 'demo' && !isLoopbackName(data.HOST))
+    throw new StartError(
+      `The demo listens on this machine only: HOST must be 127.0.0.1, ::1 or localhost, not ${data.HOST}. Set NODE_ENV=production for a real installation.`,
+    )
+  const databaseFile = resolve(projectRoot, data.DATABASE_FILE)
+  return {
+    mode,
+    host: data.HOST,
+    port: data.PORT,
+    databaseFile,
+    sessionSecret: mode === 'demo' ? demoSecret(databaseFile) : requireSecret(data.SESSION_SECRET),
+    logLevel: data.LOG_LEVEL,
+    trustProxy: data.TRUST_PROXY,
+    clientDirectory: join(projectRoot, 'dist', 'client'),
+    bcryptCost: 12,
+    rates: { failedSignInsPerQuarterHour: 50, requestsPerMinute: 2400 },
+  }
+}
+
+function requireSecret(secret: string | undefined): string {
+  if (secret && secret.length >= secretLength) return secret
+  throw new StartError(
+    `In production SESSION_SECRET must be set to a random text of at least ${secretLength} characters, such as the output of "openssl rand -hex 32".`,
+  )
+}
+
+/** The demo's own secret: made once and kept beside the database, readable by its owner alone. */
+function demoSecret(databaseFile: string): string {
+  const file = `${databaseFile}.secret`
+  try {
+    if (existsSync(file)) {
+      const kept = readFileSync(file, 'utf8').trim()
+      if (kept.length >= secretLength) return kept
+    }
+    const secret = randomBytes(32).toString('hex')
+    mkdirSync(dirname(file), { recursive: true })
+    writeFileSync(file, `${secret}\n`, { mode: 0o600 })
+    chmodSync(file, 0o600)
+    return secret
+  } catch (error) {
+    throw new StartError(
+      `The folder of the database, ${dirname(file)}, cannot be written (${(error as NodeJS.ErrnoException).code}): choose another DATABASE_FILE.`,
+    )
+  }
+}

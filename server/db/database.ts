@@ -1,0 +1,104 @@
+import { accessSync, constants, existsSync, mkdirSync } from 'node:fs'
+import { dirname } from 'node:path'
+import { Sequelize, Transaction } from 'sequelize'
+import { driver } from '#server/db/driver.ts'
+import { createMigrator } from '#server/db/migrator.ts'
+import { defineModels, type Models } from '#server/db/models/index.ts'
+import { WriteQueue } from '#server/db/write-queue.ts'
+import { StartError } from '#server/start-error.ts'
+
+/** The open database: models to read through, and one queue for everything that changes it. */
+export class Database {
+  readonly models: Models
+  readonly #queue = new WriteQueue()
+
+  constructor(readonly sequelize: Sequelize) {
+    this.models = defineModels(sequelize)
+  }
+
+  /**
+   * Runs `work` alone, in an IMMEDIATE transaction that commits when it resolves and rolls back when it rejects.
+   * Pass `transaction` to every query inside; never write within a write.
+   */
+  write<T>(work: (transaction: Transaction) => Promise<T>): Promise<T> {
+    return this.#queue.add(() => this.sequelize.transaction({ type: Transaction.TYPES.IMMEDIATE }, work))
+  }
+
+  /** Applies every migration that is still missing. */
+  async migrate(): Promise<void> {
+    const migrator = createMigrator(this.sequelize)
+    const known = new Set((await migrator.migrations({})).map((migration) => migration.name))
+    const newer = (await migrator.executed()).find((migration) => !known.has(migration.name))
+    if (newer)
+      throw new StartError(
+        `The database was written by a newer version (migration ${newer.name}): start that version, or choose another DATABASE_FILE.`,
+      )
+    await migrator.up()
+  }
+
+  /** Rejects when the database does not answer. */
+  async ping(): Promise<void> {
+    await this.sequelize.query('SELECT 1')
+  }
+
+  /** Waits for the writes that were asked for, then closes the file. */
+  async close(): Promise<void> {
+    await this.#queue.drained()
+    await this.sequelize.close()
+  }
+}
+
+/**
+ * Opens the database file, made when missing, with write-ahead logging and migrated to the newest schema.
+ * @throws StartError with a sentence when the file cannot be written or is no database of ours
+ */
+export async function openDatabase(file: string): Promise<Database> {
+  assertWritable(file)
+  const sequelize = new Sequelize({
+    dialect: 'sqlite',
+    dialectModule: driver,
+    storage: file,
+    logging: false,
+    transactionType: Transaction.TYPES.IMMEDIATE,
+  })
+  const database = new Database(sequelize)
+  try {
+    await sequelize.query('PRAGMA journal_mode = WAL')
+    await database.migrate()
+    return database
+  } catch (error) {
+    await sequelize.close().catch(() => undefined)
+    throw asStartError(error, file)
+  }
+}
+
+function assertWritable(file: string): void {
+  try {
+    mkdirSync(dirname(file), { recursive: true })
+    accessSync(existsSync(file) ? file : dirname(file), constants.W_OK)
+  } catch (error) {
+    throw unwritable(file, (error as NodeJS.ErrnoException).code)
+  }
+}
+
+const unwritable = (file: string, code = 'unknown reason') =>
+  new StartError(`The database ${file} cannot be written (${code}): choose another DATABASE_FILE.`)
+
+/** SQLite's result codes (https://www.sqlite.org/rescode.html) as sentences; other errors pass unchanged. */
+function asStartError(error: unknown, file: string): unknown {
+  const code = (error as { original?: { code?: string } }).original?.code
+  if (code === 'SQLITE_NOTADB' || code === 'SQLITE_CORRUPT')
+    return new StartError(
+      `The file ${file} is damaged or no SQLite database: restore it from a backup, or choose another DATABASE_FILE.`,
+    )
+  if (
+    code === 'SQLITE_CANTOPEN' ||
+    code === 'SQLITE_READONLY' ||
+    code === 'SQLITE_IOERR' ||
+    code === 'SQLITE_FULL'
+  )
+    return unwritable(file, code)
+  if (code === 'SQLITE_BUSY')
+    return new StartError(`The database ${file} is locked by another process: stop that one first.`)
+  return error
+}

@@ -1,0 +1,2 @@
+/** A worker file that cannot even be loaded. */
+throw new Error('this thread never starts')

@@ -1,0 +1,16 @@
+/** A worker that misbehaves on demand: `timing.duration` says how. */
+import type { RunInputs } from '#shared/schemas/simulation.ts'
+
+export const behaviours = { answer: 1, die: 2, throw: 3, hang: 4 }
+
+export default function misbehave({ timing }: RunInputs) {
+  switch (timing.duration) {
+    case behaviours.die:
+      return process.exit(7)
+    case behaviours.throw:
+      throw new TypeError('a defect in the engine')
+    case behaviours.hang:
+      Atomics.wait(new Int32Array(new SharedArrayBuffer(4)), 0, 0)
+  }
+  return { kind: 'solver', path: [], sentence: 'The odd worker answered.' }
+}

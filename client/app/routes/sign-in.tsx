@@ -1,0 +1,1 @@
+export { SignInPage as Component } from '#client/features/session/sign-in-page.tsx'

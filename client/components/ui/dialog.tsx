@@ -1,0 +1,69 @@
+/** A modal dialog (radix): traps focus, closes with Escape, gives focus back. */
+import { Dialog as Radix, VisuallyHidden } from 'radix-ui'
+import type { ReactNode } from 'react'
+
+export interface DialogProps {
+  title: string
+  /** A sentence under the title that the dialog is also described by. */
+  description?: ReactNode
+  open: boolean
+  onOpenChange: (open: boolean) => void
+  children?: ReactNode
+  /** Buttons, the main one last. */
+  footer?: ReactNode
+  /** Refuses Escape and presses outside, where nothing sensible lies behind. */
+  stay?: boolean
+}
+
+export function Dialog({
+  title,
+  description,
+  open,
+  onOpenChange,
+  children,
+  footer,
+  stay = false,
+}: DialogProps) {
+  const hold = (event: Event) => {
+    if (stay) event.preventDefault()
+  }
+  return (
+    <Radix.Root open={open} onOpenChange={onOpenChange}>
+      <Radix.Portal>
+        <Radix.Overlay className="fixed inset-0 z-40 bg-veil" />
+        <Radix.Content
+          aria-describedby={description ? undefined : ''}
+          onEscapeKeyDown={hold}
+          onInteractOutside={hold}
+          className="fixed top-[min(18vh,10rem)] left-1/2 z-50 flex max-h-[calc(100dvh-2*min(9vh,5rem))] w-[min(30rem,calc(100vw-2rem))] -translate-x-1/2 flex-col rounded-lg border border-line bg-card shadow-float focus:outline-none max-sm:top-4 max-sm:max-h-[calc(100dvh-2rem)]"
+        >
+          <div className="flex items-start gap-4 px-5 pt-4 pb-2">
+            <Radix.Title className="grow text-lg font-medium">{title}</Radix.Title>
+            {!stay && (
+              <Radix.Close className="-mt-1 -mr-2 grid size-8 shrink-0 place-items-center rounded-md text-soft hover:bg-sunk hover:text-ink">
+                <svg
+                  aria-hidden
+                  viewBox="0 0 16 16"
+                  className="size-4"
+                  fill="none"
+                  stroke="currentColor"
+                  strokeWidth="1.5"
+                >
+                  <path d="M3.5 3.5l9 9m0-9l-9 9" />
+                </svg>
+                <VisuallyHidden.Root>Close</VisuallyHidden.Root>
+              </Radix.Close>
+            )}
+          </div>
+          <div className="min-h-0 grow overflow-y-auto px-5 pb-5">
+            {description && <Radix.Description className="mb-3 text-soft">{description}</Radix.Description>}
+            {children}
+          </div>
+          {footer && (
+            <div className="flex flex-wrap justify-end gap-2 border-t border-hair px-5 py-3">{footer}</div>
+          )}
+        </Radix.Content>
+      </Radix.Portal>
+    </Radix.Root>
+  )
+}

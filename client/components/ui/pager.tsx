@@ -1,0 +1,42 @@
+import { Button } from '#client/components/ui/button.tsx'
+
+export interface PagerProps {
+  /** From 1. */
+  page: number
+  pageSize: number
+  /** Items over all pages. */
+  total: number
+  onPage: (page: number) => void
+  /** What is counted, in the plural: "designs". */
+  noun: string
+}
+
+/** Steps through a list page by page and says where one is. */
+export function Pager({ page, pageSize, total, onPage, noun }: PagerProps) {
+  const pages = Math.max(1, Math.ceil(total / pageSize))
+  const first = total === 0 ? 0 : (page - 1) * pageSize + 1
+  const last = Math.min(total, page * pageSize)
+  return (
+    <nav
+      aria-label={`Pages of ${noun}`}
+      className="flex flex-wrap items-center justify-between gap-3 text-sm"
+    >
+      <p className="text-soft">
+        {first}–{last} of {total} {noun}
+      </p>
+      {pages > 1 && (
+        <div className="flex items-center gap-2">
+          <Button disabled={page <= 1} onClick={() => onPage(page - 1)}>
+            Previous
+          </Button>
+          <span className="text-soft">
+            page {page} of {pages}
+          </span>
+          <Button disabled={page >= pages} onClick={() => onPage(page + 1)}>
+            Next
+          </Button>
+        </div>
+      )}
+    </nav>
+  )
+}

@@ -71,16 +71,16 @@ export function useWaveformPointer(
     if (!current.moved && Math.abs(distance) < dragThreshold) return
     current.moved = true
     dragged.current = true
-    if (current.kind === 'select') {
-      const ends = [fraction(current.startX), fraction(event.clientX)]
-      setSelection([Math.min(...ends), Math.max(...ends)])
-    } else if (current.kind === 'pan') {
-      const shift = (-distance / width()) * (current.view[1] - current.view[0])
-      change({ view: panView(current.view, shift, state.whole) })
-    } else {
+    if (current.kind === 'cursor') {
       change({
         cursors: withCursor(state.cursors, current.which, timeAt(fraction(event.clientX), state.view)),
       })
+    } else if (current.kind === 'select') {
+      const ends = [fraction(current.startX), fraction(event.clientX)]
+      setSelection([Math.min(...ends), Math.max(...ends)])
+    } else {
+      const shift = (-distance / width()) * (current.view[1] - current.view[0])
+      change({ view: panView(current.view, shift, state.whole) })
     }
   }
 

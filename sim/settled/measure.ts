@@ -1,0 +1,121 @@
+/**
+ * Measures the settled tone by going on from the record's end: to the next rising zero of `v1`, over whole periods to
+ * find their length, and over the same periods again on an even grid. So the figures do not depend on the record's own
+ * sample interval.
+ */
+import { deviceIndex, v1Index, v2Index, voIndex, type Plant } from '#sim/circuit/plant.ts'
+import type { Machine, Position } from '#sim/modes/machine.ts'
+import { Columns } from '#sim/record/columns.ts'
+import { Cycles } from '#sim/record/cycles.ts'
+import { Spans } from '#sim/record/spans.ts'
+import { analyseHarmonics, totalHarmonicDistortion } from '#sim/spectrum/harmonics.ts'
+import type { Mode, SettledTone } from '#sim/types.ts'
+
+/** Harmonics in every THD. */
+export const harmonicCount = 20
+/** Samples of the analysis grid over all periods measured, a power of two. */
+const gridSamples = 4096
+/** Samples of one period in `SettledTone.waveform`. */
+export const waveformSamples = 1024
+/** How much longer than expected a cycle may take before the search for its end is given up. */
+const patience = 3
+
+export interface SettledMeasurement {
+  tone: SettledTone
+  high: number
+  low: number
+  mean: number
+  rms: number
+  thd: number
+  thdAtInput: number
+  shares: Record<Exclude<Mode, 'linear'>, number>
+  peakOutputCurrent: number
+}
+
+/**
+ * @param cuts rising zeros of `v1` per period
+ * @param expected about how long such a cycle takes, s
+ * @returns null when the motion ends or stops repeating on the way
+ */
+export function measureSettled(
+  machine: Machine,
+  from: Position,
+  cuts: number,
+  expected: number,
+): SettledMeasurement | null {
+  const { plant } = machine.settings
+  const position: Position = { ...from, y: [...from.y] }
+  const toZero = new Cycles(plant, () => true)
+  if (machine.run(position, position.t + patience * expected, [toZero]) !== 'stopped') return null
+
+  position.y[v1Index] = 0
+  const start: Position = { ...position, y: [...position.y] }
+  let crossings = 0
+  const oneTurn = new Cycles(plant, () => ++crossings === cuts, start.t)
+  const spans = new Spans()
+  if (machine.run(position, start.t + patience * cuts * expected, [oneTurn, spans]) !== 'stopped') return null
+  spans.close()
+  const period = position.t - start.t
+
+  const columns = new Columns(gridSamples, start.t, period / gridSamples, plant.dimension === 4)
+  let current = 0
+  const corners = {
+    enter: ({ y }: Readonly<Position>) =>
+      void (current = Math.max(current, Math.abs(plant.outputCurrent(y)))),
+    advance: () => {},
+  }
+  const grid: Position = { ...start, y: [...start.y] }
+  if (machine.run(grid, start.t + period, [columns, corners]) !== 'reachedEnd') return null
+
+  const output = analyseHarmonics(columns.vo, 1, harmonicCount)
+  const input = analyseHarmonics(columns.v1, 1, harmonicCount)
+  const share = (mode: Mode) => spans.share(mode, start.t, position.t)
+  return {
+    tone: {
+      frequency: 1 / period,
+      periods: 1,
+      harmonics: output.harmonics,
+      harmonicsAtInput: input.harmonics,
+      waveform: { vo: thinned(columns.vo), v1: thinned(columns.v1) },
+    },
+    high: oneTurn.list.reduce((most, { high }) => Math.max(most, high), largest(columns.vo)),
+    low: oneTurn.list.reduce(
+      (least, { low }) => Math.min(least, low),
+      -largest(columns.vo.map((value) => -value)),
+    ),
+    mean: output.mean,
+    rms: output.rms,
+    thd: totalHarmonicDistortion(output.harmonics),
+    thdAtInput: totalHarmonicDistortion(input.harmonics),
+    shares: {
+      heldHigh: share('heldHigh'),
+      heldLow: share('heldLow'),
+      slewUp: share('slewUp'),
+      slewDown: share('slewDown'),
+    },
+    peakOutputCurrent: Math.max(current, peakCurrent(plant, columns)),
+  }
+}
+
+function largest(samples: Float64Array): number {
+  return samples.reduce((most, value) => Math.max(most, value), -Infinity)
+}
+
+function thinned(samples: Float64Array): Float64Array {
+  const every = samples.length / waveformSamples
+  return Float64Array.from({ length: waveformSamples }, (_, n) => samples[n * every]!)
+}
+
+/** Greatest |output current| over the samples, A. */
+function peakCurrent(plant: Plant, { vo, v1, v2, device }: Columns): number {
+  const y = [0, 0, 0, 0]
+  let peak = 0
+  for (let n = 0; n < vo.length; n++) {
+    y[voIndex] = vo[n]!
+    y[v1Index] = v1[n]!
+    y[v2Index] = v2[n]!
+    if (device) y[deviceIndex] = device[n]!
+    peak = Math.max(peak, Math.abs(plant.outputCurrent(y)))
+  }
+  return peak
+}

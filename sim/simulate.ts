@@ -1,0 +1,158 @@
+/** The time-domain simulation: power-on to the end of the record, and the figures of what it settles to. */
+import type { Circuit } from '#shared/schemas/circuit.ts'
+import { limits } from '#shared/limits.ts'
+import { naturalRate } from '#sim/circuit/loop-polynomial.ts'
+import { Plant } from '#sim/circuit/plant.ts'
+import { railPieces } from '#sim/circuit/rails.ts'
+import { invalid, solverFailure, stoppedFailure, tooStiff } from '#sim/failures.ts'
+import { figuresOf } from '#sim/figures.ts'
+import { Machine, type Observer } from '#sim/modes/machine.ts'
+import { WorkMeter } from '#sim/ode/integrate.ts'
+import { Columns } from '#sim/record/columns.ts'
+import { Cycles } from '#sim/record/cycles.ts'
+import { Spans } from '#sim/record/spans.ts'
+import { measureSettled, type SettledMeasurement } from '#sim/settled/measure.ts'
+import { cutsPerPeriod } from '#sim/settled/steadiness.ts'
+import { swings, whyUnsettled } from '#sim/settled/unsettled.ts'
+import { smallSignal } from '#sim/small-signal.ts'
+import { startLevel } from '#sim/start-level.ts'
+import type { Failure, SimulateOptions, Simulation, SmallSignal } from '#sim/types.ts'
+import { mostEvaluations, predictedEvaluations } from '#sim/work.ts'
+
+/** Relative tolerance of the integrator. */
+const tolerance = 1e-9
+/** Longest integration step as a share of 1/ω0 · 2π. */
+const stepsPerPeriod = 8
+/** First step after a mode change, in time constants of the fastest pole. */
+const firstStepShare = 0.5
+/** Advances between two looks at the caller's wishes. */
+const advancesPerLook = 128
+
+/** Reports progress and asks whether to stop. */
+class Hooks implements Observer {
+  private count = 0
+  constructor(
+    private readonly duration: number,
+    private readonly options: SimulateOptions,
+  ) {}
+  advance(_stretch: unknown, _a: number, b: number): number | void {
+    if (++this.count % advancesPerLook !== 0) return
+    this.options.onProgress?.(b / this.duration)
+    if (this.options.shouldStop?.()) return b
+  }
+}
+
+/** The first of the options that no computation can work with, or null. */
+function optionFault({ duration, sampleInterval }: SimulateOptions): Failure | null {
+  if (!(duration > 0 && Number.isFinite(duration)))
+    return invalid(['timing', 'duration'], 'Duration must be a finite number greater than zero.')
+  if (!(sampleInterval > 0 && Number.isFinite(sampleInterval)))
+    return invalid(['timing', 'sampleInterval'], 'Sample interval must be a finite number greater than zero.')
+  if (Math.round(duration / sampleInterval) + 1 > limits.samples)
+    return invalid(['timing', 'sampleInterval'], 'The record has more samples than the engine takes.')
+  return null
+}
+
+function emptySimulation(options: SimulateOptions, failure: Failure): Simulation {
+  const none = () => new Float64Array(0)
+  return {
+    status: 'failed',
+    failure,
+    sampleInterval: options.sampleInterval,
+    vo: none(),
+    v1: none(),
+    v2: none(),
+    modes: [],
+    envelope: { time: none(), value: none() },
+    figures: null,
+    tone: null,
+    unsettled: null,
+    cost: { method: 'odex', steps: 0, evaluations: 0, events: 0 },
+  }
+}
+
+function machineFor(circuit: Circuit, options: SimulateOptions, linear: SmallSignal): Machine {
+  const plant = new Plant(circuit)
+  const { supply, amplifier, network } = circuit
+  const scale = Math.max(supply.positive - amplifier.headroomHigh, supply.negative - amplifier.headroomLow)
+  const period = (2 * Math.PI) / naturalRate(network)
+  const fastest = linear.poles.reduce((most, { re, im }) => Math.max(most, Math.hypot(re, im)), 1 / period)
+  const volts = Math.min(scale, startLevel(circuit, options.stimulus, linear.gain))
+  return new Machine({
+    plant,
+    pieces: railPieces(circuit, options.stimulus),
+    tolerance,
+    smallest: plant.dimension === 4 ? [volts, volts, volts, 1] : [volts, volts, volts],
+    scale,
+    shortTime: firstStepShare / fastest,
+    longestStep: period / stepsPerPeriod,
+    work: new WorkMeter(mostEvaluations),
+  })
+}
+
+/**
+ * Simulates from power-on. `circuit` has passed `circuitSchema`. Never throws for its inputs: what cannot be computed
+ * comes back as status `failed` with a sentence.
+ */
+export function simulate(circuit: Circuit, options: SimulateOptions): Simulation {
+  const fault = optionFault(options)
+  if (fault) return emptySimulation(options, fault)
+  const linear = smallSignal(circuit)
+  const samples = Math.round(options.duration / options.sampleInterval) + 1
+  const duration = (samples - 1) * options.sampleInterval
+  const predicted = predictedEvaluations(linear, duration)
+  if (predicted > mostEvaluations)
+    return emptySimulation(options, tooStiff(predicted, mostEvaluations, duration))
+
+  const machine = machineFor(circuit, options, linear)
+  const { plant, work } = machine.settings
+  const columns = new Columns(samples, 0, options.sampleInterval, plant.path.state !== null)
+  const cycles = new Cycles(plant)
+  const spans = new Spans()
+  const kick = options.stimulus.kind === 'kick' ? options.stimulus.voltage : 0
+  const position = machine.start(plant.initialState(kick))
+  const outcome = machine.run(position, duration, [columns, cycles, spans, new Hooks(duration, options)])
+  spans.close()
+
+  const complete = outcome === 'reachedEnd'
+  let settled: SettledMeasurement | null = null
+  if (complete && swings(cycles.list, machine.settings.scale)) {
+    const cuts = cutsPerPeriod(cycles.list)
+    const last = cycles.list.at(-1)!
+    if (cuts !== null) settled = measureSettled(machine, position, cuts, last.end - last.start)
+  }
+  const ending = {
+    circuit,
+    stimulus: options.stimulus,
+    linear,
+    cycles: cycles.list,
+    modes: spans.list,
+    duration,
+  }
+  options.onProgress?.(1)
+  return {
+    status: complete ? 'complete' : outcome === 'stopped' ? 'stopped' : 'failed',
+    ...(complete
+      ? {}
+      : { failure: outcome === 'stopped' ? stoppedFailure : solverFailure(outcome, position.t) }),
+    sampleInterval: options.sampleInterval,
+    vo: columns.vo.subarray(0, columns.filled),
+    v1: columns.v1.subarray(0, columns.filled),
+    v2: columns.v2.subarray(0, columns.filled),
+    ...(plant.path.state && columns.device
+      ? {
+          control: {
+            name: plant.path.state.name,
+            unit: plant.path.state.unit,
+            values: columns.device.subarray(0, columns.filled),
+          },
+        }
+      : {}),
+    modes: spans.list,
+    envelope: { time: Float64Array.from(cycles.peakTimes), value: Float64Array.from(cycles.peakValues) },
+    figures: complete ? figuresOf(linear, cycles, settled) : null,
+    tone: settled?.tone ?? null,
+    unsettled: !complete || settled ? null : whyUnsettled(ending),
+    cost: { method: 'odex', steps: work.steps, evaluations: work.evaluations, events: machine.events },
+  }
+}

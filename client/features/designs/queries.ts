@@ -1,0 +1,25 @@
+/** Server state of the list of designs and of the projects. */
+import { keepPreviousData, queryOptions } from '@tanstack/react-query'
+import { api } from '#client/lib/api.ts'
+import type { DesignSummary, ListDesigns, Project } from '#shared/schemas/design.ts'
+import type { Page } from '#shared/schemas/paging.ts'
+
+export const designQueries = {
+  all: () => ['designs'] as const,
+  lists: () => [...designQueries.all(), 'list'] as const,
+  list: (params: ListDesigns) =>
+    queryOptions({
+      queryKey: [...designQueries.lists(), params],
+      queryFn: ({ signal }) => api.get<Page<DesignSummary>>('/designs', { signal, query: { ...params } }),
+      placeholderData: keepPreviousData,
+    }),
+}
+
+export const projectQueries = {
+  all: () => ['projects'] as const,
+  list: () =>
+    queryOptions({
+      queryKey: projectQueries.all(),
+      queryFn: async ({ signal }) => (await api.get<{ items: Project[] }>('/projects', { signal })).items,
+    }),
+}

@@ -1,6 +1,5 @@
 import { useEffect, useState } from 'react'
 import { useSearchParams } from 'react-router-dom'
-import type { View } from '#client/components/charts/chart-types.ts'
 import { readViewState, writeViewState, type ViewState } from '#client/lib/view-params.ts'
 
 /** Quiet time before the address follows, ms: browsers refuse a page that rewrites its address too often. */

@@ -43,7 +43,8 @@ export const runQueries = {
 export const runMutations = {
   save: (client: QueryClient) =>
     mutationOptions({
-      mutationFn: (body: CreateRun) => api.post<Run>('/runs', body),
+      mutationFn: ({ body, signal }: { body: CreateRun; signal?: AbortSignal }) =>
+        api.post<Run>('/runs', body, { signal }),
       onSuccess: async (run) => {
         client.setQueryData(runQueries.detail(run.id).queryKey, run)
         await client.invalidateQueries({ queryKey: runQueries.lists() })

@@ -1,36 +1,52 @@
-import { useEffect, useState } from 'react'
+import { useEffect, useEffectEvent, useState } from 'react'
 import { advance, nextChange, previousChange } from '#client/features/runs/lib/playhead.ts'
 import type { RunModeSpan } from '#shared/schemas/run.ts'
 
 /** Longest frame that counts, s: a page that was in the background goes on from where it was. */
 const longestFrame = 0.1
 
+export interface Playhead {
+  playing: boolean
+  /** Begins again from power-on when it stands at the end. */
+  play: () => void
+  pause: () => void
+  /** Pauses and goes to an instant, s. */
+  seek: (time: number) => void
+  /** To the next and the previous change of mode; null where there is none. */
+  stepForward: (() => void) | null
+  stepBack: (() => void) | null
+}
+
+export interface PlayheadOptions {
+  modes: readonly RunModeSpan[]
+  /** Last instant of the record, s. */
+  end: number
+  /** Seconds of record per second. */
+  speed: number
+  /** Where it stands, s. */
+  time: number
+  onTime: (time: number) => void
+}
+
 /**
- * The playhead of a record. It never starts by itself, so nothing moves for those who prefer no motion until they
- * press play.
- * @param end last instant of the record, s
- * @param speed seconds of record per second
- * @param time where it stands, s; controlled
+ * Moves the playhead of a record. It never starts by itself, so nothing moves for those who prefer no motion until
+ * they press play.
  */
-export function usePlayhead(
-  modes: readonly RunModeSpan[],
-  end: number,
-  speed: number,
-  time: number,
-  onTime: (time: number) => void,
-) {
+export function usePlayhead({ modes, end, speed, time, onTime }: PlayheadOptions): Playhead {
   const [wantsToPlay, setWantsToPlay] = useState(false)
   const playing = wantsToPlay && time < end
+  const onFrame = useEffectEvent((elapsed: number) => onTime(advance(time, elapsed, speed, end)))
 
   useEffect(() => {
     if (!playing) return
-    const shown = performance.now()
-    const frame = requestAnimationFrame((now) => {
-      const elapsed = Math.min(longestFrame, Math.max(0, (now - shown) / 1000))
-      onTime(advance(time, elapsed, speed, end))
+    let latest: number | null = null
+    let frame = requestAnimationFrame(function step(now) {
+      if (latest !== null) onFrame(Math.min(longestFrame, (now - latest) / 1000))
+      latest = now
+      frame = requestAnimationFrame(step)
     })
     return () => cancelAnimationFrame(frame)
-  }, [playing, time, speed, end, onTime])
+  }, [playing])
 
   const seek = (wanted: number) => {
     setWantsToPlay(false)
@@ -40,7 +56,6 @@ export function usePlayhead(
   const previous = previousChange(modes, time)
   return {
     playing,
-    /** Begins again from power-on when it stands at the end. */
     play: () => {
       if (time >= end) onTime(0)
       setWantsToPlay(true)

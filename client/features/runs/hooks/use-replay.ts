@@ -12,13 +12,19 @@ export type ReplayState =
   | { kind: 'failed'; sentence: string }
   | { kind: 'compared'; comparison: ReplayComparison; engineVersion: string; tone: SettledTone | null }
 
+export interface Replay {
+  state: ReplayState
+  start: () => void
+  cancel: () => void
+}
+
 /** The replayed columns in the order in which a run stores them. */
 function columnsOf({ vo, v1, v2, control }: Simulation): Float64Array[] {
   return [vo, v1, v2, ...(control ? [control.values] : [])]
 }
 
 /** Recomputes a run in this browser and compares it with what is stored. Leaving the page ends the computation. */
-export function useReplay(run: Run, columns: readonly Float64Array[]) {
+export function useReplay(run: Run, columns: readonly Float64Array[]): Replay {
   const engine = useEngine()
   const [state, setState] = useState<ReplayState>({ kind: 'idle' })
   const underWay = useRef<AbortController | null>(null)

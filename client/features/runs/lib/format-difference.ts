@@ -1,0 +1,40 @@
+import { figure, type FigureKey } from '#shared/figures.ts'
+import { formatFigure } from '#shared/units/format-figure.ts'
+import { thinSpace } from '#shared/units/format.ts'
+
+const superscripts: Record<string, string> = {
+  '-': '⁻',
+  '0': '⁰',
+  '1': '¹',
+  '2': '²',
+  '3': '³',
+  '4': '⁴',
+  '5': '⁵',
+  '6': '⁶',
+  '7': '⁷',
+  '8': '⁸',
+  '9': '⁹',
+}
+/** Below this a number without prefix is easier read as a power of ten. */
+const smallest = 1e-3
+
+function powerOfTen(value: number): string {
+  const [mantissa, exponent] = value.toExponential(1).split('e') as [string, string]
+  const raised = [...exponent.replace('+', '')].map((digit) => superscripts[digit]).join('')
+  return `${mantissa.replace('-', '−')} × 10${raised}`
+}
+
+/**
+ * A small difference or tolerance of a figure, in the figure's own way of being shown: two digits; what has no SI
+ * prefix to shrink into becomes a power of ten.
+ */
+export function formatDifference(key: FigureKey, value: number | null, signed = false): string {
+  if (value === null) return '–'
+  if (value === 0) return '0'
+  const { shownAs } = figure(key)
+  const shown = shownAs === 'percent' ? value * 100 : value
+  if (shownAs === 'quantity' || Math.abs(shown) >= smallest)
+    return formatFigure(key, value, { digits: 2, signed })
+  const sign = signed && value > 0 ? '+' : ''
+  return `${sign}${powerOfTen(shown)}${shownAs === 'percent' ? `${thinSpace}%` : ''}`
+}

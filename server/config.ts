@@ -8,36 +8,24 @@ import { StartError } from '#server/start-error.ts'
 
 const secretLength = 32
 
+const portSentence = 'PORT must be a whole number from 0 to 65535.'
+const proxySentence = 'TRUST_PROXY must be the number of proxies in front, 0 to 10.'
+
+const whole = (error: string, greatest: number) =>
+  z.coerce.number({ error }).int({ error }).min(0, { error }).max(greatest, { error })
+
 const environmentSchema = z.object({
   NODE_ENV: z.string().default('demo'),
-  HOST: z
-    .string()
-    .trim()
-    .min(1, { error: 'HOST is empty: leave it out or name an address.' })
-    .default('127.0.0.1'),
-  PORT: z.coerce
-    .number({ error: 'PORT must be a whole number from 0 to 65535.' })
-    .int({ error: 'PORT must be a whole number from 0 to 65535.' })
-    .min(0, { error: 'PORT must be a whole number from 0 to 65535.' })
-    .max(65535, { error: 'PORT must be a whole number from 0 to 65535.' })
-    .default(4173),
-  DATABASE_FILE: z
-    .string()
-    .trim()
-    .min(1, { error: 'DATABASE_FILE is empty: leave it out or name a file.' })
-    .default('data/sinewright.sqlite'),
+  HOST: z.string().trim().default('127.0.0.1'),
+  PORT: whole(portSentence, 65535).default(4173),
+  DATABASE_FILE: z.string().trim().default('data/sinewright.sqlite'),
   SESSION_SECRET: z.string().optional(),
   LOG_LEVEL: z
     .enum(['fatal', 'error', 'warn', 'info', 'debug', 'trace', 'silent'], {
       error: 'LOG_LEVEL must be one of fatal, error, warn, info, debug, trace, silent.',
     })
     .default('info'),
-  TRUST_PROXY: z.coerce
-    .number({ error: 'TRUST_PROXY must be the number of proxies in front, 0 to 10.' })
-    .int({ error: 'TRUST_PROXY must be the number of proxies in front, 0 to 10.' })
-    .min(0, { error: 'TRUST_PROXY must be the number of proxies in front, 0 to 10.' })
-    .max(10, { error: 'TRUST_PROXY must be the number of proxies in front, 0 to 10.' })
-    .default(0),
+  TRUST_PROXY: whole(proxySentence, 10).default(0),
 })
 
 /** Everything that the environment decides, read once at the start of the process. */
@@ -61,11 +49,12 @@ export interface Config {
 }
 
 /**
- * Environment → configuration.
+ * Environment → configuration. An empty variable counts as one that is not set.
  * @throws StartError with a sentence for each variable that cannot be used
  */
 export function readConfig(environment: NodeJS.ProcessEnv): Config {
-  const parsed = environmentSchema.safeParse(environment)
+  const given = Object.fromEntries(Object.entries(environment).filter(([, value]) => value?.trim()))
+  const parsed = environmentSchema.safeParse(given)
   if (!parsed.success) throw new StartError(parsed.error.issues.map((issue) => issue.message).join(' '))
   const { data } = parsed
   const mode = data.NODE_ENV === 'production' ? 'production' : 'demo'

@@ -1,0 +1,55 @@
+import { Router } from 'express'
+import type { AppContext } from '#server/context.ts'
+import { presentDesign, presentDesignSummary, presentDraft } from '#server/features/designs/present.ts'
+import { designsUseCases } from '#server/features/designs/use-cases.ts'
+import { authorise, signedIn } from '#server/http/authenticate.ts'
+import { readBody, readId, readQuery } from '#server/http/input.ts'
+import {
+  changeDesignSchema,
+  createDesignSchema,
+  duplicateDesignSchema,
+  listDesignsSchema,
+  saveDraftSchema,
+  type DesignSummary,
+} from '#shared/schemas/design.ts'
+import type { Page } from '#shared/schemas/paging.ts'
+
+const what = 'This design'
+
+export function designsRouter(context: AppContext): Router {
+  const designs = designsUseCases(context)
+  const router = Router()
+  router.get('/', authorise('designs.read'), async (request, response) => {
+    const query = readQuery(request, listDesignsSchema)
+    const { rows, count } = await designs.list(query)
+    const page: Page<DesignSummary> = {
+      items: rows.map(presentDesignSummary),
+      total: count,
+      page: query.page,
+      pageSize: query.pageSize,
+    }
+    response.json(page)
+  })
+  router.post('/', authorise('designs.edit'), async (request, response) => {
+    const body = readBody(request, createDesignSchema)
+    response.status(201).json(presentDesign(await designs.create(body, signedIn(request).person)))
+  })
+  router.get('/:id', authorise('designs.read'), async (request, response) => {
+    response.json(presentDesign(await designs.read(readId(request, what))))
+  })
+  router.patch('/:id', authorise('designs.edit'), async (request, response) => {
+    const id = readId(request, what)
+    response.json(presentDesign(await designs.change(id, readBody(request, changeDesignSchema))))
+  })
+  router.post('/:id/duplicate', authorise('designs.edit'), async (request, response) => {
+    const id = readId(request, what)
+    const { name } = readBody(request, duplicateDesignSchema)
+    response.status(201).json(presentDesign(await designs.duplicate(id, name, signedIn(request).person)))
+  })
+  router.put('/:id/draft', authorise('designs.edit'), async (request, response) => {
+    const id = readId(request, what)
+    const body = readBody(request, saveDraftSchema)
+    response.json(presentDraft(await designs.saveDraft(id, body, signedIn(request).person)))
+  })
+  return router
+}

@@ -1,0 +1,62 @@
+/** The unsaved draft kept in this browser, so that a crash, a closed tab or a lost server costs nothing. */
+import { z } from 'zod'
+import { draftContentSchema, type DraftContent } from '#shared/schemas/simulation.ts'
+
+const draftCopySchema = z.object({
+  /** Version on the server that the edits began from. */
+  version: z.number().int(),
+  /** ISO 8601. */
+  at: z.string(),
+  content: draftContentSchema,
+})
+
+export type DraftCopy = z.infer<typeof draftCopySchema>
+
+/** One copy per person and design; a shared bench computer shows nobody another one's edits. */
+const key = (personId: number, designId: number) => `sinewright.draft.${personId}.${designId}`
+
+export interface DraftCopies {
+  read(): DraftCopy | null
+  keep(version: number, content: DraftContent): void
+  forget(): void
+}
+
+/**
+ * @param storage the browser's own, which may be full or forbidden: then there is no copy, and nothing else changes
+ */
+export function draftCopies(personId: number, designId: number, storage: Storage): DraftCopies {
+  const name = key(personId, designId)
+  return {
+    read() {
+      try {
+        const text = storage.getItem(name)
+        const parsed = draftCopySchema.safeParse(text === null ? null : JSON.parse(text))
+        return parsed.success ? parsed.data : null
+      } catch (error) {
+        console.warn('An unsaved copy of this draft could not be read.', error)
+        return null
+      }
+    },
+    keep(version, content) {
+      try {
+        storage.setItem(name, JSON.stringify({ version, at: new Date().toISOString(), content }))
+      } catch (error) {
+        console.warn('The unsaved draft could not be kept in this browser.', error)
+      }
+    },
+    forget: () => storage.removeItem(name),
+  }
+}
+
+/** Whether two contents are the same values. */
+export function sameContent(a: DraftContent, b: DraftContent): boolean {
+  return canonical(a) === canonical(b)
+}
+
+function canonical(value: unknown): string {
+  return JSON.stringify(value, (_key, inner: unknown) =>
+    inner !== null && typeof inner === 'object' && !Array.isArray(inner)
+      ? Object.fromEntries(Object.entries(inner).sort(([a], [b]) => (a < b ? -1 : 1)))
+      : inner,
+  )
+}

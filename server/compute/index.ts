@@ -12,6 +12,8 @@ export type { ComputedRun, ComputeResult, Failure } from '#server/compute/comput
 const timeLimit = 60_000
 /** Computations that may wait for a thread; beyond them a question is refused at once. */
 const maxQueue = 16
+/** How long a stopping server waits for the computations under way, ms. */
+const closeTimeout = 5_000
 
 export interface ComputeOptions {
   threads?: number
@@ -28,7 +30,7 @@ export interface Compute {
    * reason when the caller aborts (the thread is then ended and replaced).
    */
   run(inputs: RunInputs, options?: { signal?: AbortSignal }): Promise<ComputeResult>
-  /** Lets running computations finish, then ends the threads. */
+  /** Lets the computations under way finish within a few seconds, then ends the threads. */
   close(): Promise<void>
 }
 
@@ -54,6 +56,7 @@ export function createCompute(options: ComputeOptions = {}): Compute {
       execArgv,
       minThreads: threads,
       maxThreads: threads,
+      closeTimeout,
     })
     // A thread that cannot even start leaves piscina without threads for good: the next question starts a new pool.
     started.on('error', () => {

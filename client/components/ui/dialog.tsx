@@ -15,6 +15,18 @@ export interface DialogProps {
   stay?: boolean
 }
 
+/** Focus begins at what is asked for, else at the first button of the footer, never at "Close". */
+function focusFirst(event: Event) {
+  const content = event.currentTarget
+  if (!(content instanceof HTMLElement)) return
+  const first =
+    content.querySelector<HTMLElement>('[data-part=body] :is(input, select, textarea):enabled') ??
+    content.querySelector<HTMLElement>('[data-part=footer] button:enabled')
+  if (!first) return
+  event.preventDefault()
+  first.focus()
+}
+
 export function Dialog({
   title,
   description,
@@ -33,6 +45,7 @@ export function Dialog({
         <Radix.Overlay className="fixed inset-0 z-40 bg-veil" />
         <Radix.Content
           aria-describedby={description ? undefined : ''}
+          onOpenAutoFocus={focusFirst}
           onEscapeKeyDown={hold}
           onInteractOutside={hold}
           className="fixed top-[min(18vh,10rem)] left-1/2 z-50 flex max-h-[calc(100dvh-2*min(9vh,5rem))] w-[min(30rem,calc(100vw-2rem))] -translate-x-1/2 flex-col rounded-lg border border-line bg-card shadow-float focus:outline-none max-sm:top-4 max-sm:max-h-[calc(100dvh-2rem)]"
@@ -55,12 +68,17 @@ export function Dialog({
               </Radix.Close>
             )}
           </div>
-          <div className="min-h-0 grow overflow-y-auto px-5 pb-5">
-            {description && <Radix.Description className="mb-3 text-soft">{description}</Radix.Description>}
+          <div data-part="body" className="min-h-0 grow space-y-3 overflow-y-auto px-5 pb-5">
+            {description && <Radix.Description className="text-soft">{description}</Radix.Description>}
             {children}
           </div>
           {footer && (
-            <div className="flex flex-wrap justify-end gap-2 border-t border-hair px-5 py-3">{footer}</div>
+            <div
+              data-part="footer"
+              className="flex flex-wrap justify-end gap-2 border-t border-hair px-5 py-3"
+            >
+              {footer}
+            </div>
           )}
         </Radix.Content>
       </Radix.Portal>

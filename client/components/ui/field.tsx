@@ -20,6 +20,7 @@ export interface FieldProps {
   label: ReactNode
   /** What is wrong, as a sentence. */
   error?: string
+  /** Help before anything is wrong; an error takes its place. */
   hint?: ReactNode
   required?: boolean
   /** Keeps the label for screen readers only. */
@@ -32,7 +33,7 @@ export function Field({ label, error, hint, required, labelHidden, className, ch
   const id = useId()
   const hintId = `${id}-hint`
   const errorId = `${id}-error`
-  const described = [error && errorId, hint && hintId].filter(Boolean).join(' ')
+  const described = error ? errorId : hint ? hintId : undefined
   return (
     <div className={classNames('flex min-w-0 flex-col gap-1', className)}>
       <label htmlFor={id} className={labelHidden ? 'sr-only' : 'text-sm font-medium text-ink'}>
@@ -41,7 +42,7 @@ export function Field({ label, error, hint, required, labelHidden, className, ch
       <FieldContext
         value={{
           id,
-          'aria-describedby': described || undefined,
+          'aria-describedby': described,
           'aria-invalid': error ? true : undefined,
           'aria-required': required ? true : undefined,
         }}
@@ -53,7 +54,7 @@ export function Field({ label, error, hint, required, labelHidden, className, ch
           {error}
         </p>
       )}
-      {hint && (
+      {hint && !error && (
         <p id={hintId} className="text-sm text-soft">
           {hint}
         </p>

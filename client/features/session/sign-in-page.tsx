@@ -22,11 +22,10 @@ export function SignInPage() {
       <Card className="p-6">
         <SignInForm onSignedIn={() => void navigate(safeNext(search.get('next')), { replace: true })} />
       </Card>
-      <p className="mt-5 text-center text-sm text-soft">
-        Design, prove and sign off RC sine-wave oscillators.
-        <br />
-        In a demo, the sign-ins are printed where the server was started.
-      </p>
+      <div className="mt-5 text-center text-sm text-soft *:text-balance">
+        <p>Design, prove and sign off RC sine-wave oscillators.</p>
+        <p>In a demo, the sign-ins are printed where the server was started.</p>
+      </div>
     </main>
   )
 }

@@ -7,7 +7,7 @@ import { readBody, readId, readQuery } from '#server/http/input.ts'
 import { createRunSchema, listRunsSchema } from '#shared/schemas/run.ts'
 
 /** `/api/runs`: saved runs with their evidence. */
-export function runRoutes(context: AppContext): Router {
+export function runsRouter(context: AppContext): Router {
   const runs = runsUseCases(context)
   const router = Router()
 

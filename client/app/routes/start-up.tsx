@@ -1,0 +1,9 @@
+/** /designs/:designId/start-up */
+import { useOutletContext } from 'react-router-dom'
+import type { Sheet } from '#client/features/sheet/sheet.ts'
+import { StartUpPage } from '#client/features/start-up/index.ts'
+
+export function Component() {
+  const { content, live } = useOutletContext<Sheet>()
+  return <StartUpPage control={content.circuit.amplitudeControl.kind} live={live} />
+}

@@ -1,0 +1,87 @@
+/**
+ * Around everything that shows a live record: what is being computed and how to stop it, that what is shown is out
+ * of date, why there is nothing. Its first line keeps its height, so that nothing below jumps.
+ */
+import type { ReactNode } from 'react'
+import { Button } from '#client/components/ui/button.tsx'
+import { classNames } from '#client/components/ui/class-names.ts'
+import { EmptyState } from '#client/components/ui/empty-state.tsx'
+import { Notice } from '#client/components/ui/notice.tsx'
+import type { LiveResult } from '#client/lib/live-result.ts'
+import { formatPercent, formatQuantity } from '#shared/units/format.ts'
+import type { Simulation } from '#sim/types.ts'
+
+export interface RecordFrameProps {
+  live: LiveResult
+  /** Gives up the computation under way. */
+  onCancel?: () => void
+  children: (simulation: Simulation) => ReactNode
+}
+
+const count = new Intl.NumberFormat('en')
+
+function Progress({ done, onCancel }: { done: number; onCancel?: () => void }) {
+  return (
+    <div className="late flex grow items-center gap-3">
+      <span className="whitespace-nowrap">Computing the record, {formatPercent(done, { digits: 2 })}</span>
+      <progress
+        aria-label="Computing the record"
+        value={done}
+        max={1}
+        className="h-1.5 max-w-60 min-w-16 grow accent-petrol"
+      />
+      {onCancel && (
+        <Button variant="quiet" onClick={onCancel}>
+          Cancel
+        </Button>
+      )}
+    </div>
+  )
+}
+
+function StatusLine({ live, onCancel }: Omit<RecordFrameProps, 'children'>) {
+  const { simulation, progress, stale } = live
+  return (
+    <div className="flex min-h-9 flex-wrap items-center gap-x-4 text-sm text-soft">
+      {progress !== null && <Progress done={progress} onCancel={onCancel} />}
+      {stale && simulation && (
+        <span className="late rounded-full bg-warn-wash px-2.5 py-0.5 text-warn">
+          Out of date: this record belongs to earlier values
+        </span>
+      )}
+      {!stale && progress === null && simulation && (
+        <span>
+          Record of {formatQuantity((simulation.vo.length - 1) * simulation.sampleInterval, 's')} from
+          power-on: {count.format(simulation.vo.length)} samples, one every{' '}
+          {formatQuantity(simulation.sampleInterval, 's')}
+        </span>
+      )}
+    </div>
+  )
+}
+
+export function RecordFrame({ live, onCancel, children }: RecordFrameProps) {
+  const { simulation, failure, progress, stale } = live
+  return (
+    <div className="min-w-0">
+      {failure && (
+        <Notice tone="bad" title="There is no record for these values" className="mb-2">
+          {failure.sentence}
+        </Notice>
+      )}
+      <StatusLine live={live} onCancel={onCancel} />
+      {simulation && (
+        <div className={classNames('transition-opacity', stale && 'opacity-60 delay-300')}>
+          {children(simulation)}
+        </div>
+      )}
+      {!simulation && !failure && (
+        <EmptyState title={progress === null ? 'No record yet' : 'The first record is on its way'}>
+          {progress === null
+            ? 'A record appears here as soon as every value is valid.'
+            : 'It appears here when it is complete.'}
+        </EmptyState>
+      )}
+    </div>
+  )
+}

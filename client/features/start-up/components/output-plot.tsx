@@ -1,0 +1,95 @@
+/** "Output from power-on": the record with envelope, limits and cursors, its overview and its CSV file. */
+import { useMemo, useState } from 'react'
+import type { Cursors, LimitSpan, View } from '#client/components/charts/chart-types.ts'
+import { CursorTable } from '#client/components/charts/cursor-table.tsx'
+import { OverviewStrip } from '#client/components/charts/overview-strip.tsx'
+import { PlotCard, type KeyItem } from '#client/components/charts/plot-card.tsx'
+import { waveformTable } from '#client/components/charts/plot-table.ts'
+import { saveText, spanCsv } from '#client/components/charts/span-csv.ts'
+import { WaveformChart } from '#client/components/charts/waveform-chart.tsx'
+import { Button } from '#client/components/ui/button.tsx'
+import { Checkbox } from '#client/components/ui/checkbox.tsx'
+import { startUpSeries, type SeriesChoice } from '#client/features/start-up/lib/start-up-series.ts'
+import { formatQuantity } from '#shared/units/format.ts'
+import type { Simulation } from '#sim/types.ts'
+
+export interface OutputPlotProps {
+  simulation: Simulation
+  spans: readonly LimitSpan[]
+  view: View
+  onViewChange: (view: View) => void
+  cursors: Cursors
+  onCursorsChange: (cursors: Cursors) => void
+}
+
+export function OutputPlot({ simulation, spans, ...rest }: OutputPlotProps) {
+  const { sampleInterval, envelope, figures, control } = simulation
+  const { view, onViewChange, cursors } = rest
+  const [choice, setChoice] = useState<SeriesChoice>({ node: false, control: false })
+  const [saving, setSaving] = useState(false)
+  const series = useMemo(() => startUpSeries(simulation, choice), [simulation, choice])
+  const overview = useMemo(() => startUpSeries(simulation, { node: false, control: false }), [simulation])
+  const timeTo90 = figures?.timeTo90 ?? null
+  const marks = useMemo(
+    () =>
+      timeTo90 === null
+        ? []
+        : [{ time: timeTo90, label: `90 % at ${formatQuantity(timeTo90, 's', { digits: 3 })}` }],
+    [timeTo90],
+  )
+  const keyItems: KeyItem[] = [
+    ...series.map((one) => ({ label: one.label, sign: one.color, dashed: one.dash !== undefined })),
+    { label: 'envelope', sign: 'copper' },
+    ...(spans.some((span) => span.kind === 'held')
+      ? [{ label: 'held at a rail', sign: 'held' } as const]
+      : []),
+    ...(spans.some((span) => span.kind === 'slew') ? [{ label: 'slewing', sign: 'slew' } as const] : []),
+  ]
+
+  async function save() {
+    setSaving(true)
+    try {
+      saveText(await spanCsv(series, sampleInterval, view), 'output-from-power-on.csv')
+    } finally {
+      setSaving(false)
+    }
+  }
+
+  return (
+    <PlotCard
+      title="Output from power-on"
+      keyItems={keyItems}
+      table={() => waveformTable(series, sampleInterval, view)}
+      actions={
+        <Button variant="quiet" busy={saving} onClick={save}>
+          Save span as CSV
+        </Button>
+      }
+      footer={<CursorTable series={series} sampleInterval={sampleInterval} cursors={cursors} />}
+    >
+      <WaveformChart
+        {...{ sampleInterval, series, envelope, spans, marks }}
+        {...rest}
+        label="Output from power-on, volts over time"
+      />
+      <OverviewStrip series={overview[0]!} {...{ sampleInterval, view, onViewChange }} />
+      <div className="flex flex-wrap items-center gap-x-5 px-2 pt-1.5 text-sm text-soft">
+        <Checkbox
+          label="Network node"
+          checked={choice.node}
+          onChange={(event) => setChoice({ ...choice, node: event.target.checked })}
+        />
+        {control && (
+          <Checkbox
+            label={control.name}
+            checked={choice.control}
+            onChange={(event) => setChoice({ ...choice, control: event.target.checked })}
+          />
+        )}
+        <span className="ml-auto">
+          Drag to zoom, click to place a cursor, double-click for the whole record.
+        </span>
+      </div>
+    </PlotCard>
+  )
+}

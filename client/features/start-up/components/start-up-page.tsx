@@ -1,0 +1,63 @@
+/** Start-up: does it start, how fast, and what stops the growth? */
+import { useMemo } from 'react'
+import { limitSpans } from '#client/components/charts/limit-spans.ts'
+import { RecordFrame } from '#client/components/charts/record-frame.tsx'
+import { CloseUpCard } from '#client/features/start-up/components/close-up-card.tsx'
+import { GrowthCard } from '#client/features/start-up/components/growth-card.tsx'
+import { OutputPlot } from '#client/features/start-up/components/output-plot.tsx'
+import { PolesCard } from '#client/features/start-up/components/poles-card.tsx'
+import { SharesCard } from '#client/features/start-up/components/shares-card.tsx'
+import { useLiveView } from '#client/features/start-up/hooks/use-live-view.ts'
+import { closeUp } from '#client/features/start-up/lib/close-up.ts'
+import { growthStory } from '#client/features/start-up/lib/growth-story.ts'
+import { modeShares } from '#client/features/start-up/lib/mode-shares.ts'
+import type { LiveResult } from '#client/lib/live-result.ts'
+import type { AmplitudeControl } from '#shared/schemas/circuit.ts'
+import type { Simulation, SmallSignal } from '#sim/types.ts'
+
+export interface StartUpPageProps {
+  control: AmplitudeControl['kind']
+  live: LiveResult
+  /** Gives up the computation under way. */
+  onCancel?: () => void
+}
+
+interface StartUpRecordProps {
+  control: AmplitudeControl['kind']
+  smallSignal: SmallSignal | null
+  simulation: Simulation
+}
+
+function StartUpRecord({ control, smallSignal, simulation }: StartUpRecordProps) {
+  const { figures, sampleInterval } = simulation
+  const end = (simulation.vo.length - 1) * sampleInterval
+  const { view, setView, cursors, setCursors } = useLiveView(end, sampleInterval)
+  const spans = useMemo(() => limitSpans(simulation.modes), [simulation.modes])
+  const shares = useMemo(() => modeShares(simulation), [simulation])
+  const near = closeUp(figures, end)
+  return (
+    <div className="space-y-4">
+      <OutputPlot
+        {...{ simulation, spans, view, cursors }}
+        onViewChange={setView}
+        onCursorsChange={setCursors}
+      />
+      <div className="grid items-start gap-4 xl:grid-cols-2">
+        {smallSignal && <GrowthCard story={growthStory({ control, smallSignal, simulation })} />}
+        <SharesCard shares={shares} />
+        {near && (
+          <CloseUpCard closeUp={near} {...{ simulation, spans, cursors }} onCursorsChange={setCursors} />
+        )}
+        {smallSignal && <PolesCard smallSignal={smallSignal} />}
+      </div>
+    </div>
+  )
+}
+
+export function StartUpPage({ control, live, onCancel }: StartUpPageProps) {
+  return (
+    <RecordFrame live={live} onCancel={onCancel}>
+      {(simulation) => <StartUpRecord {...{ control, simulation }} smallSignal={live.smallSignal} />}
+    </RecordFrame>
+  )
+}

@@ -1,0 +1,26 @@
+/** The series of the start-up plot out of a record. */
+import type { WaveformSeries } from '#client/components/charts/chart-types.ts'
+import type { Simulation } from '#sim/types.ts'
+
+/** Series besides the output that a person may add. */
+export interface SeriesChoice {
+  node: boolean
+  control: boolean
+}
+
+/** Output, then the network node and the amplitude control's own state where they are chosen and exist. */
+export function startUpSeries({ vo, v1, control }: Simulation, choice: SeriesChoice): WaveformSeries[] {
+  const series: WaveformSeries[] = [{ key: 'vo', label: 'output', unit: 'V', values: vo, color: 'petrol' }]
+  if (choice.node)
+    series.push({ key: 'v1', label: 'network node', unit: 'V', values: v1, color: 'plum', dash: [5, 3] })
+  if (choice.control && control)
+    series.push({
+      key: 'control',
+      label: control.name,
+      unit: control.unit,
+      values: control.values,
+      color: 'moss',
+      dash: [8, 3, 2, 3],
+    })
+  return series
+}

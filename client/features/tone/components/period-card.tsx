@@ -1,0 +1,33 @@
+/** One exact settled period of output and network node. */
+import { useMemo, useState } from 'react'
+import type { Cursors, View } from '#client/components/charts/chart-types.ts'
+import { CursorTable } from '#client/components/charts/cursor-table.tsx'
+import { PlotCard } from '#client/components/charts/plot-card.tsx'
+import { waveformTable } from '#client/components/charts/plot-table.ts'
+import { WaveformChart, wholeView } from '#client/components/charts/waveform-chart.tsx'
+import { onePeriod } from '#client/features/tone/lib/one-period.ts'
+import type { SettledTone } from '#sim/types.ts'
+
+export function PeriodCard({ tone }: { tone: SettledTone }) {
+  const { series, sampleInterval } = useMemo(() => onePeriod(tone), [tone])
+  const [zoom, setZoom] = useState<{ of: SettledTone; view: View } | null>(null)
+  const [cursors, setCursors] = useState<Cursors>([null, null])
+  const whole = useMemo(() => wholeView(series, sampleInterval), [series, sampleInterval])
+  const view = zoom?.of === tone ? zoom.view : whole
+  return (
+    <PlotCard
+      title="One settled period"
+      keyItems={series.map((one) => ({ label: one.label, sign: one.color, dashed: one.dash !== undefined }))}
+      table={() => waveformTable(series, sampleInterval, view)}
+      footer={<CursorTable {...{ series, sampleInterval, cursors }} />}
+    >
+      <WaveformChart
+        {...{ sampleInterval, series, view, cursors }}
+        onViewChange={(next) => setZoom({ of: tone, view: next })}
+        onCursorsChange={setCursors}
+        height={260}
+        label="One settled period of output and network node, volts over time"
+      />
+    </PlotCard>
+  )
+}

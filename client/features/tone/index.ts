@@ -1,0 +1,1 @@
+export { TonePage, type TonePageProps } from '#client/features/tone/components/tone-page.tsx'

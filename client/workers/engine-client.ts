@@ -9,10 +9,11 @@ import { createLane } from '#client/workers/lane.ts'
 import { createRecordQueue } from '#client/workers/record-queue.ts'
 
 /**
- * How long (ms since its start) a record may still run once a newer request waits: long enough that the figures follow
- * a moving trim slider with every record of an ordinary circuit, short enough not to feel like a delay.
+ * How long (ms since its start) a record may still run once a newer request waits: long enough for the record of an
+ * ordinary 1 kHz circuit by the stepping integrator, so that the figures follow a moving trim slider; short enough
+ * that nobody waits noticeably for the values that he or she stopped at.
  */
-export const graceTime = 250
+export const graceTime = 400
 
 export interface OwnedEngine extends EngineClient {
   /** Ends every worker. Requests under way reject with an `AbortError`. */

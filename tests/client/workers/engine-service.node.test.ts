@@ -1,7 +1,7 @@
 import { expose, proxy, releaseProxy, wrap, type Remote } from 'comlink'
 import nodeEndpoint from 'comlink/dist/umd/node-adapter.js'
 import { MessageChannel } from 'node:worker_threads'
-import { afterEach, beforeEach, describe, expect, it } from 'vitest'
+import { afterEach, beforeEach, describe, expect, it, vi } from 'vitest'
 import { isFailure, type RecordResult } from '#client/lib/engine-context.ts'
 import { callsOn, type EngineConnection, type EngineService } from '#client/workers/engine-connection.ts'
 import { engineService } from '#client/workers/engine-service.ts'
@@ -35,6 +35,7 @@ describe('the engine over a message channel', () => {
       inputs,
       proxy((done: number) => void shares.push(done)),
     )
+    await vi.waitFor(() => expect(shares.at(-1)).toBe(1))
     expect(shares.length).toBeGreaterThan(1)
     expect([...shares].sort((a, b) => a - b)).toEqual(shares)
     expect(shares.every((share) => share >= 0 && share <= 1)).toBe(true)

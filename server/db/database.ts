@@ -11,6 +11,7 @@ import { StartError } from '#server/start-error.ts'
 export class Database {
   readonly models: Models
   readonly #queue = new WriteQueue()
+  #closed: Promise<void> | null = null
 
   constructor(readonly sequelize: Sequelize) {
     this.models = defineModels(sequelize)
@@ -41,10 +42,10 @@ export class Database {
     await this.sequelize.query('SELECT 1')
   }
 
-  /** Waits for the writes that were asked for, then closes the file. */
-  async close(): Promise<void> {
-    await this.#queue.drained()
-    await this.sequelize.close()
+  /** Waits for the writes that were asked for, then closes the file; once, however often it is asked. */
+  close(): Promise<void> {
+    this.#closed ??= this.#queue.drained().then(() => this.sequelize.close())
+    return this.#closed
   }
 }
 

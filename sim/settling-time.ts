@@ -3,7 +3,7 @@ import { naturalRate } from '#sim/circuit/loop-polynomial.ts'
 import type { SmallSignal } from '#sim/types.ts'
 
 /** Natural logarithm of how far the distance from the settled level should shrink. */
-const shrink = Math.log(1e5)
+const shrink = Math.log(3e4)
 /** A clipping loop settles within some periods of its first touch. */
 const clippingPeriods = 8
 

@@ -1,13 +1,14 @@
 /** The time-domain simulation: power-on to the end of the record, and the figures of what it settles to. */
 import type { Circuit } from '#shared/schemas/circuit.ts'
 import { limits } from '#shared/limits.ts'
+import { fastestRate } from '#sim/circuit/fastest-rate.ts'
 import { naturalRate } from '#sim/circuit/loop-polynomial.ts'
 import { Plant } from '#sim/circuit/plant.ts'
 import { railPieces } from '#sim/circuit/rails.ts'
 import { invalid, solverFailure, stoppedFailure, tooStiff } from '#sim/failures.ts'
 import { figuresOf } from '#sim/figures.ts'
 import { Machine, type Observer } from '#sim/modes/machine.ts'
-import { WorkMeter } from '#sim/ode/integrate.ts'
+import { stableReach, WorkMeter } from '#sim/ode/integrate.ts'
 import { Columns } from '#sim/record/columns.ts'
 import { Cycles } from '#sim/record/cycles.ts'
 import { Spans } from '#sim/record/spans.ts'
@@ -20,7 +21,7 @@ import type { Failure, SimulateOptions, Simulation, SmallSignal } from '#sim/typ
 import { mostEvaluations, predictedEvaluations } from '#sim/work.ts'
 
 /** Relative tolerance of the integrator. */
-const tolerance = 1e-9
+const tolerance = 1e-7
 /** Longest integration step as a share of 1/ω0 · 2π. */
 const stepsPerPeriod = 8
 /** First step after a mode change, in time constants of the fastest pole. */
@@ -76,7 +77,7 @@ function machineFor(circuit: Circuit, options: SimulateOptions, linear: SmallSig
   const { supply, amplifier, network } = circuit
   const scale = Math.max(supply.positive - amplifier.headroomHigh, supply.negative - amplifier.headroomLow)
   const period = (2 * Math.PI) / naturalRate(network)
-  const fastest = linear.poles.reduce((most, { re, im }) => Math.max(most, Math.hypot(re, im)), 1 / period)
+  const fastest = Math.max(fastestRate(circuit, linear), 1 / period)
   const volts = Math.min(scale, startLevel(circuit, options.stimulus, linear.gain))
   return new Machine({
     plant,
@@ -86,6 +87,7 @@ function machineFor(circuit: Circuit, options: SimulateOptions, linear: SmallSig
     scale,
     shortTime: firstStepShare / fastest,
     longestStep: period / stepsPerPeriod,
+    longestLinearStep: Math.min(period / stepsPerPeriod, stableReach / fastest),
     work: new WorkMeter(mostEvaluations),
   })
 }

@@ -4,7 +4,7 @@ import type { SmallSignal } from '#sim/types.ts'
 /** Evaluations of the equations in one computation: some seconds. */
 export const mostEvaluations = 30_000_000
 /** Evaluations per time constant of the fastest pole, whose decay limits an explicit integrator's steps. */
-const perTimeConstant = 5.5
+const perTimeConstant = 2.2
 /** Evaluations per period where accuracy limits the steps. */
 const perPeriod = 200
 
@@ -15,7 +15,7 @@ export function predictedEvaluations({ poles, frequency }: SmallSignal, duration
 }
 
 /** Evaluations that a record whose length is chosen here may take, unless it would show next to nothing. */
-const automaticEvaluations = 4_000_000
+const automaticEvaluations = 10_000_000
 
 /** Longest record that is cheap enough to be chosen without being asked for, s. */
 export function affordableDuration(linear: SmallSignal): number {

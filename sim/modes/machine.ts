@@ -41,6 +41,8 @@ export interface MachineSettings {
   shortTime: number
   /** s. */
   longestStep: number
+  /** The same in the linear mode, where the amplifier's own pole limits it, s. */
+  longestLinearStep: number
   work: WorkMeter
 }
 
@@ -103,7 +105,8 @@ export class Machine {
 
   /** One mode, from `position` to the first guard that fires or to `until`; moves `position` there. */
   private runMode(position: Position, piece: RailPiece, until: number, observers: readonly Observer[]) {
-    const { plant, tolerance, smallest, scale, shortTime, longestStep, work } = this.settings
+    const { plant, tolerance, smallest, scale, shortTime, longestStep, longestLinearStep, work } =
+      this.settings
     const { stretch } = this
     const { mode } = position
     const watched = guardsOf(plant, piece, mode, scale).map((guard) => watch(guard, position.t, position.y))
@@ -118,16 +121,16 @@ export class Machine {
         relativeTolerance: tolerance,
         absoluteTolerance: smallest.map((size) => size * tolerance),
         firstStep: Math.min(shortTime, until - position.t),
-        longestStep,
+        longestStep: mode === 'linear' ? longestLinearStep : longestStep,
         work,
       },
       (from, to, y, dense) => {
-        stretch.set(mode, from, to, dense)
+        stretch.set(mode, from, to, y, dense)
         const looks = Math.max(1, Math.ceil(((to - from) / longestStep) * looksPerLongestStep))
         let a = from
         for (let look = 1; look <= looks; look++) {
           const b = look === looks ? to : from + ((to - from) * look) / looks
-          firing = firstFiring(watched, stretch, a, b, look === looks ? y : stretch.at(b))
+          firing = firstFiring(watched, stretch, a, b)
           const reached = firing ? firing.time : b
           const stop = this.show(observers, a, reached)
           if (stop !== null) {

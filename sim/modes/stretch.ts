@@ -15,6 +15,7 @@ export class Stretch {
   from = 0
   to = 0
   mode: Mode = 'linear'
+  private end: readonly number[] = []
   private dense: Dense = () => NaN
   private readonly state: number[]
 
@@ -22,20 +23,22 @@ export class Stretch {
     this.state = new Array<number>(dimension).fill(0)
   }
 
-  set(mode: Mode, from: number, to: number, dense: Dense): void {
+  set(mode: Mode, from: number, to: number, end: readonly number[], dense: Dense): void {
     this.mode = mode
     this.from = from
     this.to = to
+    this.end = end
     this.dense = dense
   }
 
   /** One component at `t`. */
   component(index: number, t: number): number {
-    return this.dense(index, t)
+    return t === this.to ? this.end[index]! : this.dense(index, t)
   }
 
   /** The state at `t`, in an array that the next call overwrites. */
   at(t: number): readonly number[] {
+    if (t === this.to) return this.end
     for (let i = 0; i < this.dimension; i++) this.state[i] = this.dense(i, t)
     return this.state
   }
@@ -57,20 +60,17 @@ export function watch(guard: Guard, t: number, y: readonly number[]): WatchedGua
   return { guard, value: guard.value(t, y), rate: guard.rate(t, y) }
 }
 
-/**
- * Looks at every guard at `b` after the look at `a`, and returns the first to fire in between, or null.
- * @param y the state at `b`
- */
+/** Looks at every guard at `b` after the look at `a`, and returns the first to fire in between, or null. */
 export function firstFiring(
   watched: readonly WatchedGuard[],
   stretch: Stretch,
   a: number,
   b: number,
-  y: readonly number[],
 ): Firing | null {
   let first: Firing | null = null
   for (const entry of watched) {
     const { guard, value: before, rate: rateBefore } = entry
+    const y = stretch.at(b)
     entry.value = guard.value(b, y)
     entry.rate = guard.rate(b, y)
     let until = b

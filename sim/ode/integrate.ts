@@ -44,7 +44,14 @@ export type IntegrationOutcome =
 
 /** odex's smallest first step, in units of its variable. */
 const smallestFirstStep = 1e-4
-const extrapolationColumns = 9
+/**
+ * Columns of the extrapolation table: odex then stays with its fourth-order member (2 and 6 substeps). A stiff amplifier
+ * limits the steps by stability, and that member reaches furthest along the negative real axis for its work:
+ * 5.03 with 9 evaluations, against 6.39 with 33 for the member of order eight (from their stability functions).
+ */
+const extrapolationColumns = 3
+/** |step × pole| that is still well damped for a negative real pole. */
+export const stableReach = 4.5
 /** Outcomes by odex's numbering. */
 const converged = 0
 const maxStepsExceeded = 1

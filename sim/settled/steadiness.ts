@@ -4,7 +4,7 @@ import type { Cycle } from '#sim/record/cycles.ts'
 /** Largest distance from the level or period still to come, relative, at which a record counts as settled. */
 export const settledTolerance = 1e-4
 /** Change from cycle to cycle, relative, that is the integrator's own noise. */
-const noise = 1e-8
+const noise = 1e-7
 /** Most rising zeros of `v1` that one period of the motion may have. */
 const mostCutsPerPeriod = 4
 /** The two windows compared are this share of all cycles each, within bounds. */

@@ -46,6 +46,7 @@ async function createAdmin(config: Config, input: unknown): Promise<string> {
 }
 
 async function main(): Promise<void> {
+  process.umask(0o077)
   const [name, email, ...rest] = process.argv.slice(2)
   if (name === undefined || email === undefined || rest.length > 0)
     throw new StartError('Usage: create-admin "<name>" <e-mail>, with the password on standard input.')

@@ -13,6 +13,8 @@ import { StartError } from '#server/start-error.ts'
 const stopTimeout = 10_000
 
 async function start(): Promise<void> {
+  // Database and secret are for this user's eyes only.
+  process.umask(0o077)
   const config = readConfig(process.env)
   const log = createLog(config)
   const database = await openDatabase(config.databaseFile)

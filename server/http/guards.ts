@@ -28,6 +28,7 @@ export function securityHeaders({ mode, trustProxy }: Config): RequestHandler {
       },
     },
     strictTransportSecurity: behindTls,
+    xFrameOptions: { action: 'deny' },
   })
 }
 

@@ -13,4 +13,8 @@ export interface LiveResult {
   progress: number | null
   /** Why the latest inputs gave no record. */
   failure: Failure | null
+  /** Gives up the computation under way: `progress` becomes null and the older record stays, stale. */
+  cancel?: () => void
+  /** Computes the record after all. */
+  resume?: () => void
 }

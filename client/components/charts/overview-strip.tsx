@@ -1,5 +1,5 @@
 /** The whole record at a glance, with a window on the visible span: drag it or its edges, or use the arrow keys. */
-import { useMemo, useRef, type KeyboardEvent, type PointerEvent } from 'react'
+import { useMemo, useRef, type KeyboardEvent, type PointerEvent, type ReactNode } from 'react'
 import type { View, WaveformSeries } from '#client/components/charts/chart-types.ts'
 import { drawnGrid } from '#client/components/charts/decimate.ts'
 import { plotFrame, valueRange } from '#client/components/charts/plot-frame.ts'
@@ -46,9 +46,67 @@ function path(series: WaveformSeries, sampleInterval: number, whole: View, width
   }).join('')
 }
 
+interface StripPartProps {
+  part: Part
+  view: View
+  whole: View
+  least: number
+  /** Of the strip, CSS pixels. */
+  width: number
+  onViewChange: (view: View) => void
+  className: string
+  children?: ReactNode
+}
+
+/** The window or one of its edges: a slider for pointer and arrow keys. */
+function StripPart({ part, view, whole, least, width, onViewChange, className, children }: StripPartProps) {
+  const grip = useRef<{ x: number; view: View } | null>(null)
+  const span = whole[1] - whole[0]
+  const move = (from: View, shift: number) => onViewChange(movedPart(part, from, shift, whole, least))
+  const letGo = () => {
+    grip.current = null
+  }
+
+  function onPointerDown(event: PointerEvent) {
+    event.stopPropagation()
+    event.currentTarget.setPointerCapture?.(event.pointerId)
+    grip.current = { x: event.clientX, view }
+  }
+
+  function onPointerMove(event: PointerEvent) {
+    if (grip.current && width > 0) move(grip.current.view, ((event.clientX - grip.current.x) / width) * span)
+  }
+
+  function onKeyDown(event: KeyboardEvent) {
+    const direction = { ArrowLeft: -1, ArrowDown: -1, ArrowRight: 1, ArrowUp: 1 }[event.key]
+    if (!direction) return
+    event.preventDefault()
+    move(view, direction * span * keyShare * (event.shiftKey ? 0.1 : 1))
+  }
+
+  const value = part === 'end' ? view[1] : view[0]
+  const text = (time: number) => formatQuantity(time, 's')
+  return (
+    <div
+      {...{ onPointerDown, onPointerMove, onKeyDown }}
+      onPointerUp={letGo}
+      onPointerCancel={letGo}
+      role="slider"
+      tabIndex={0}
+      aria-label={partNames[part]}
+      aria-valuemin={whole[0]}
+      aria-valuemax={whole[1]}
+      aria-valuenow={value}
+      aria-valuetext={part === 'window' ? `${text(view[0])} to ${text(view[1])}` : text(value)}
+      className={`touch-none ${className}`}
+    >
+      {children}
+    </div>
+  )
+}
+
 export function OverviewStrip({ series, sampleInterval, view, onViewChange }: OverviewStripProps) {
   const track = useRef<HTMLDivElement>(null)
-  const grip = useRef<{ part: Part; x: number; view: View } | null>(null)
   const width = useWidth(track)
   const interval = series.sampleInterval ?? sampleInterval
   const end = (series.values.length - 1) * interval
@@ -62,38 +120,6 @@ export function OverviewStrip({ series, sampleInterval, view, onViewChange }: Ov
   const left = Math.max(0, fractionOf(view[0], whole)) * 100
   const right = Math.min(1, fractionOf(view[1], whole)) * 100
 
-  const move = (part: Part, from: View, shift: number) =>
-    onViewChange(movedPart(part, from, shift, whole, least))
-  const handlers = (part: Part) => ({
-    onPointerDown(event: PointerEvent) {
-      event.stopPropagation()
-      event.currentTarget.setPointerCapture?.(event.pointerId)
-      grip.current = { part, x: event.clientX, view }
-    },
-    onPointerMove(event: PointerEvent) {
-      if (!grip.current || width === 0) return
-      move(grip.current.part, grip.current.view, ((event.clientX - grip.current.x) / width) * end)
-    },
-    onPointerUp: () => (grip.current = null),
-    onPointerCancel: () => (grip.current = null),
-    onKeyDown(event: KeyboardEvent) {
-      const direction = { ArrowLeft: -1, ArrowDown: -1, ArrowRight: 1, ArrowUp: 1 }[event.key]
-      if (!direction) return
-      event.preventDefault()
-      move(part, view, direction * end * keyShare * (event.shiftKey ? 0.1 : 1))
-    },
-    role: 'slider',
-    tabIndex: 0,
-    'aria-label': partNames[part],
-    'aria-valuemin': 0,
-    'aria-valuemax': end,
-    'aria-valuenow': part === 'end' ? view[1] : view[0],
-    'aria-valuetext':
-      part === 'window'
-        ? `${formatQuantity(view[0], 's')} to ${formatQuantity(view[1], 's')}`
-        : formatQuantity(part === 'end' ? view[1] : view[0], 's'),
-  })
-
   /** A press outside the window brings it there. */
   function centreAt(event: PointerEvent) {
     if (!track.current) return
@@ -103,7 +129,9 @@ export function OverviewStrip({ series, sampleInterval, view, onViewChange }: Ov
     onViewChange(clampView([centre - half, centre + half], whole, least))
   }
 
-  const edge = 'absolute inset-y-0 w-6 cursor-ew-resize touch-none'
+  const part = { view, whole, least, width, onViewChange }
+  const edge = 'absolute inset-y-0 w-6 cursor-ew-resize'
+  const handle = <span className="absolute inset-y-2.5 left-1/2 w-1 -translate-x-1/2 rounded bg-petrol" />
   return (
     <div style={{ paddingLeft: frame.left, paddingRight: frame.right }}>
       <div
@@ -116,16 +144,17 @@ export function OverviewStrip({ series, sampleInterval, view, onViewChange }: Ov
           <path d={drawing} fill="none" stroke="currentColor" strokeWidth="0.8" />
         </svg>
         <div className="absolute inset-y-0" style={{ left: `${left}%`, width: `max(4px, ${right - left}%)` }}>
-          <div
-            {...handlers('window')}
-            className="absolute inset-0 cursor-grab touch-none rounded border border-petrol bg-petrol/10 active:cursor-grabbing"
+          <StripPart
+            {...part}
+            part="window"
+            className="absolute inset-0 cursor-grab rounded border border-petrol bg-petrol/10 active:cursor-grabbing"
           />
-          <div {...handlers('start')} className={`${edge} -left-3`}>
-            <span className="absolute inset-y-2.5 left-1/2 w-1 -translate-x-1/2 rounded bg-petrol" />
-          </div>
-          <div {...handlers('end')} className={`${edge} -right-3`}>
-            <span className="absolute inset-y-2.5 left-1/2 w-1 -translate-x-1/2 rounded bg-petrol" />
-          </div>
+          <StripPart {...part} part="start" className={`${edge} -left-3`}>
+            {handle}
+          </StripPart>
+          <StripPart {...part} part="end" className={`${edge} -right-3`}>
+            {handle}
+          </StripPart>
         </div>
       </div>
     </div>

@@ -13,8 +13,6 @@ import type { Simulation } from '#sim/types.ts'
 
 export interface RecordFrameProps {
   live: LiveResult
-  /** Gives up the computation under way. */
-  onCancel?: () => void
   children: (simulation: Simulation) => ReactNode
 }
 
@@ -39,15 +37,20 @@ function Progress({ done, onCancel }: { done: number; onCancel?: () => void }) {
   )
 }
 
-function StatusLine({ live, onCancel }: Omit<RecordFrameProps, 'children'>) {
-  const { simulation, progress, stale } = live
+function StatusLine({ live }: { live: LiveResult }) {
+  const { simulation, failure, progress, stale, resume } = live
   return (
     <div className="flex min-h-9 flex-wrap items-center gap-x-4 text-sm text-soft">
-      {progress !== null && <Progress done={progress} onCancel={onCancel} />}
+      {progress !== null && <Progress done={progress} onCancel={live.cancel} />}
       {stale && simulation && (
         <span className="late rounded-full bg-warn-wash px-2.5 py-0.5 text-warn">
           Out of date: this record belongs to earlier values
         </span>
+      )}
+      {stale && progress === null && !failure && resume && (
+        <Button variant="quiet" onClick={resume}>
+          Compute the record
+        </Button>
       )}
       {!stale && progress === null && simulation && (
         <span>
@@ -60,7 +63,7 @@ function StatusLine({ live, onCancel }: Omit<RecordFrameProps, 'children'>) {
   )
 }
 
-export function RecordFrame({ live, onCancel, children }: RecordFrameProps) {
+export function RecordFrame({ live, children }: RecordFrameProps) {
   const { simulation, failure, progress, stale } = live
   return (
     <div className="min-w-0">
@@ -69,7 +72,7 @@ export function RecordFrame({ live, onCancel, children }: RecordFrameProps) {
           {failure.sentence}
         </Notice>
       )}
-      <StatusLine live={live} onCancel={onCancel} />
+      <StatusLine live={live} />
       {simulation && (
         <div className={classNames('transition-opacity', stale && 'opacity-60 delay-300')}>
           {children(simulation)}

@@ -44,7 +44,7 @@ export const WaveformCanvas = memo(function WaveformCanvas(props: WaveformCanvas
   const colours = useChartColours()
   const looks = useLooks(series)
   const hasEnvelope = envelope !== undefined
-  const behind = useRef<(plot: uPlot) => void>(() => {})
+  const behind = useRef<((plot: uPlot) => void) | null>(null)
 
   // Mount and destroy: the plot lives as long as its series and colours do.
   useEffect(() => {
@@ -56,7 +56,7 @@ export const WaveformCanvas = memo(function WaveformCanvas(props: WaveformCanvas
         series: looks,
         envelope: hasEnvelope,
         colours,
-        paintBehind: (target) => behind.current(target),
+        paintBehind: (target) => behind.current?.(target),
       }),
       undefined,
       host.current,

@@ -18,8 +18,6 @@ import type { Simulation, SmallSignal } from '#sim/types.ts'
 export interface StartUpPageProps {
   control: AmplitudeControl['kind']
   live: LiveResult
-  /** Gives up the computation under way. */
-  onCancel?: () => void
 }
 
 interface StartUpRecordProps {
@@ -54,9 +52,9 @@ function StartUpRecord({ control, smallSignal, simulation }: StartUpRecordProps)
   )
 }
 
-export function StartUpPage({ control, live, onCancel }: StartUpPageProps) {
+export function StartUpPage({ control, live }: StartUpPageProps) {
   return (
-    <RecordFrame live={live} onCancel={onCancel}>
+    <RecordFrame live={live}>
       {(simulation) => <StartUpRecord {...{ control, simulation }} smallSignal={live.smallSignal} />}
     </RecordFrame>
   )

@@ -10,8 +10,6 @@ import type { Simulation, SmallSignal } from '#sim/types.ts'
 
 export interface TonePageProps {
   live: LiveResult
-  /** Gives up the computation under way. */
-  onCancel?: () => void
 }
 
 function ToneRecord({
@@ -35,9 +33,9 @@ function ToneRecord({
   )
 }
 
-export function TonePage({ live, onCancel }: TonePageProps) {
+export function TonePage({ live }: TonePageProps) {
   return (
-    <RecordFrame live={live} onCancel={onCancel}>
+    <RecordFrame live={live}>
       {(simulation) => <ToneRecord simulation={simulation} smallSignal={live.smallSignal} />}
     </RecordFrame>
   )

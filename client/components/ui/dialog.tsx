@@ -44,7 +44,8 @@ export function Dialog({
       <Radix.Portal>
         <Radix.Overlay className="fixed inset-0 z-40 bg-veil" />
         <Radix.Content
-          aria-describedby={description ? undefined : ''}
+          // Radix ties the description by itself; told so where there is none.
+          {...(!description && { 'aria-describedby': undefined })}
           onOpenAutoFocus={focusFirst}
           onEscapeKeyDown={hold}
           onInteractOutside={hold}

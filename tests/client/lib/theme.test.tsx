@@ -1,0 +1,66 @@
+import { act, render, screen } from '@testing-library/react'
+import { afterEach, beforeEach, describe, expect, it, vi } from 'vitest'
+
+const root = document.documentElement
+
+/** A fresh module under a system that prefers dark or light, and can change its mind. */
+async function themeUnder(dark: boolean) {
+  const list = Object.assign(new EventTarget(), { matches: dark })
+  vi.stubGlobal('matchMedia', () => list)
+  vi.resetModules()
+  const theme = await import('#client/lib/theme.ts')
+  theme.startTheme()
+  function Shown() {
+    return <p>{`${theme.useThemeChoice()} ${theme.useTheme()}`}</p>
+  }
+  const turn = (now: boolean) => {
+    list.matches = now
+    list.dispatchEvent(new Event('change'))
+  }
+  return { ...theme, Shown, turn }
+}
+
+beforeEach(() => localStorage.clear())
+afterEach(() => vi.unstubAllGlobals())
+
+describe('theme', () => {
+  it('follows the system until told otherwise', async () => {
+    const { Shown, turn } = await themeUnder(true)
+    render(<Shown />)
+    expect(screen.getByText('auto dark')).toBeInTheDocument()
+    expect(root).not.toHaveAttribute('data-theme')
+    act(() => turn(false))
+    expect(screen.getByText('auto light')).toBeInTheDocument()
+  })
+
+  it('keeps a choice, in the document and over a reload', async () => {
+    const first = await themeUnder(true)
+    render(<first.Shown />)
+    act(() => first.chooseTheme('light'))
+    expect(screen.getByText('light light')).toBeInTheDocument()
+    expect(root).toHaveAttribute('data-theme', 'light')
+    delete root.dataset.theme
+    await themeUnder(true)
+    expect(root).toHaveAttribute('data-theme', 'light')
+  })
+
+  it('forgets the choice with "auto"', async () => {
+    const { chooseTheme } = await themeUnder(false)
+    chooseTheme('dark')
+    chooseTheme('auto')
+    expect(root).not.toHaveAttribute('data-theme')
+  })
+
+  it('works for the page where storage is barred', async () => {
+    vi.spyOn(Storage.prototype, 'getItem').mockImplementation(() => {
+      throw new DOMException('barred', 'SecurityError')
+    })
+    vi.spyOn(Storage.prototype, 'setItem').mockImplementation(() => {
+      throw new DOMException('barred', 'SecurityError')
+    })
+    const { chooseTheme } = await themeUnder(false)
+    chooseTheme('dark')
+    expect(root).toHaveAttribute('data-theme', 'dark')
+    vi.restoreAllMocks()
+  })
+})

@@ -1,0 +1,23 @@
+/** Mounts the whole client at an address, against a fake server, as `main.tsx` does in a browser. */
+import { render } from '@testing-library/react'
+import userEvent from '@testing-library/user-event'
+import { createMemoryRouter, RouterProvider } from 'react-router-dom'
+import { Providers } from '#client/app/providers.tsx'
+import { createRoutes } from '#client/app/router.tsx'
+import { queryClient } from '#client/lib/query-client.ts'
+
+/** The loaders' own cache, emptied: what one test saw is no answer to the next. */
+export function renderApp(address: string) {
+  queryClient.clear()
+  const router = createMemoryRouter(createRoutes(queryClient), {
+    initialEntries: [address],
+    future: { v8_middleware: true },
+  })
+  const view = render(
+    <Providers queryClient={queryClient}>
+      <RouterProvider router={router} />
+    </Providers>,
+  )
+  const at = () => `${router.state.location.pathname}${router.state.location.search}`
+  return { ...view, router, at, user: userEvent.setup() }
+}

@@ -3,14 +3,16 @@ import { Button } from '#client/components/ui/button.tsx'
 import { Field } from '#client/components/ui/field.tsx'
 import { Select } from '#client/components/ui/select.tsx'
 import type { Playhead } from '#client/features/runs/hooks/use-playhead.ts'
-import { limitWords } from '#client/features/runs/lib/limit-words.ts'
+import { limitSentences } from '#client/features/runs/lib/limit-sentences.ts'
 import type { RunModeSpan } from '#shared/schemas/run.ts'
-import { formatNumber, formatQuantity } from '#shared/units/format.ts'
+import { formatQuantity } from '#shared/units/format.ts'
+
+const count = new Intl.NumberFormat('en', { maximumFractionDigits: 0 })
 
 /** How much slower than life, in words. */
 function pace(speed: number): string {
   const amount = `${formatQuantity(speed, 's')} of record per second`
-  return speed < 1 ? `${amount}, ${formatNumber(1 / speed)} × slower` : amount
+  return speed < 1 ? `${amount}, ${count.format(1 / speed)} × slower` : amount
 }
 
 export interface PlayheadBarProps {
@@ -38,13 +40,13 @@ export function PlayheadBar(props: PlayheadBarProps) {
       <div className="flex flex-wrap items-baseline gap-x-4">
         <p className="min-w-32 text-lg font-medium">{now}</p>
         <p aria-live={playhead.playing ? 'off' : 'polite'} className={limited ? 'text-copper' : 'text-soft'}>
-          {limitWords[mode].sentence}
+          {limitSentences[mode]}
         </p>
       </div>
       <input
         type="range"
         aria-label="Instant within the visible span"
-        aria-valuetext={`${now}. ${limitWords[mode].sentence}`}
+        aria-valuetext={`${now}. ${limitSentences[mode]}`}
         className="block h-8 w-full accent-petrol"
         min={view[0]}
         max={view[1]}

@@ -34,8 +34,7 @@ export function PlainTable({ caption, heads, children }: PlainTableProps) {
 export function RowHead({ children, note }: { children: ReactNode; note?: string }) {
   return (
     <th scope="row" className="min-w-40 px-4 py-1.5 text-left align-baseline font-normal">
-      {children}
-      {note && <span className="block max-w-prose text-sm text-soft">{note}</span>}
+      {children} {note && <span className="block max-w-prose text-sm text-soft">{note}</span>}
     </th>
   )
 }

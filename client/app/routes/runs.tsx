@@ -1,0 +1,1 @@
+export { RunListPage as Component } from '#client/features/runs/run-list-page.tsx'

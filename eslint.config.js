@@ -76,9 +76,9 @@ export default tseslint.config(
       '@typescript-eslint/switch-exhaustiveness-check': 'error',
       '@typescript-eslint/no-non-null-assertion': 'off',
       '@typescript-eslint/no-invalid-void-type': 'off',
-      '@typescript-eslint/no-unused-vars': ['error', { argsIgnorePattern: '^_' }],
+      '@typescript-eslint/no-unused-vars': ['error', { argsIgnorePattern: '^_', ignoreRestSiblings: true }],
       'max-lines': ['error', { max: 400 }],
-      'no-console': 'error',
+      'no-console': ['error', { allow: ['error'] }],
       eqeqeq: 'error',
     },
   },
@@ -97,7 +97,12 @@ export default tseslint.config(
   {
     files: ['client/**/*.{ts,tsx}'],
     languageOptions: { globals: globals.browser },
-    ...reactHooks.configs.flat['recommended-latest'],
+    plugins: { 'react-hooks': reactHooks },
+    rules: {
+      ...reactHooks.configs.flat['recommended-latest'].rules,
+      // Says that the React compiler would skip a component; this project does not use the compiler.
+      'react-hooks/incompatible-library': 'off',
+    },
   },
   {
     files: ['sim/**/*.ts', 'shared/**/*.ts'],

@@ -8,7 +8,7 @@ export interface PlotFrame {
 
 /** Room for one value axis on the left, and for a second one on the right where two units are shown. */
 export function plotFrame(units: readonly string[]): PlotFrame {
-  return { left: 60, right: units.length > 1 ? 60 : 14, top: 14, bottom: 30 }
+  return { left: 60, right: units.length > 1 ? 60 : 26, top: 14, bottom: 30 }
 }
 
 /** The distinct units of some series, in order of appearance. */

@@ -54,21 +54,11 @@ export function PolePlot({ poles, height = 190 }: PolePlotProps) {
               strokeWidth="2"
             />
           ))}
-          {told.map((pole, index) => {
-            const turned = x(pole.re) > width / 2
-            return (
-              <text
-                key={index}
-                x={x(pole.re) + (turned ? -12 : 12)}
-                y={y(pole.im)}
-                dy="0.32em"
-                textAnchor={turned ? 'end' : 'start'}
-                className="fill-ink"
-              >
-                {poleText(pole)}
-              </text>
-            )
-          })}
+          {told.map((pole, index) => (
+            <text key={index} x={x(pole.re)} y={y(pole.im) + 22} textAnchor="middle" className="fill-ink">
+              {poleText(pole)}
+            </text>
+          ))}
         </svg>
       </div>
       <p className="mt-2 text-sm text-soft">

@@ -12,7 +12,9 @@ export interface PoleView {
 
 /** Poles whose magnitude exceeds the slowest one's by more than this are left out of the picture. */
 const farRatio = 20
-const room = 1.6
+/** Half-width of the picture over the largest part in it, real and imaginary: labels stand below their poles. */
+const realRoom = 2.2
+const imaginaryRoom = 1.7
 
 /**
  * The slow poles that decide the tone are shown; the amplifier's own, orders of magnitude faster, is only told. The
@@ -34,6 +36,6 @@ export function poleView(poles: readonly Complex[]): PoleView {
         largest((pole) => pole.re),
         0.005 * slowest,
       ),
-    imaginary: room * (imaginary || slowest),
+    imaginary: imaginaryRoom * (imaginary || slowest),
   }
 }

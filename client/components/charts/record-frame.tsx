@@ -40,7 +40,7 @@ function Progress({ done, onCancel }: { done: number; onCancel?: () => void }) {
 function StatusLine({ live }: { live: LiveResult }) {
   const { simulation, failure, progress, stale, resume } = live
   return (
-    <div className="flex min-h-9 flex-wrap items-center gap-x-4 text-sm text-soft">
+    <div className="flex min-h-9 flex-wrap items-center gap-x-4 py-1 text-sm text-soft">
       {progress !== null && <Progress done={progress} onCancel={live.cancel} />}
       {stale && simulation && (
         <span className="late rounded-full bg-warn-wash px-2.5 py-0.5 text-warn">

@@ -22,7 +22,7 @@ function place(time: number | null, view: View): CSSProperties | null {
 }
 
 /** Beyond this share of the width a label stands to the left of its line. */
-const turnLabel = 0.75
+const turnLabel = 0.6
 
 function Mark({ mark, view }: { mark: TimeMark; view: View }) {
   const style = place(mark.time, view)

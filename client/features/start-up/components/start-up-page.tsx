@@ -40,7 +40,7 @@ function StartUpRecord({ control, smallSignal, simulation }: StartUpRecordProps)
         onViewChange={setView}
         onCursorsChange={setCursors}
       />
-      <div className="grid items-start gap-4 xl:grid-cols-2">
+      <div className="grid gap-4 xl:grid-cols-2">
         {smallSignal && <GrowthCard story={growthStory({ control, smallSignal, simulation })} />}
         <SharesCard shares={shares} />
         {near && (

@@ -1,16 +1,19 @@
 /** Every harmonic in figures. */
 import type { HarmonicRow } from '#client/features/tone/lib/harmonic-rows.ts'
-import { formatNumber, formatPercent, formatQuantity, thinSpace } from '#shared/units/format.ts'
+import { formatPercent, formatQuantity, thinSpace } from '#shared/units/format.ts'
 
 const columns = ['frequency', 'level, peak', 'relative to the fundamental', 'per cent', 'phase']
+
+/** One decimal, also when it is zero, so that the column lines up. */
+const toTenth = (value: number) => value.toFixed(1).replace('-', '\u2212')
 
 function cells({ frequency, level, ratio, decibels, phase }: HarmonicRow): string[] {
   return [
     formatQuantity(frequency, 'Hz', { digits: 5 }),
     formatQuantity(level, 'V', { digits: 4 }),
-    ratio > 0 ? `${formatNumber(Number(decibels.toFixed(1)), { digits: 4 })}${thinSpace}dB` : '–',
+    ratio > 0 ? `${toTenth(decibels)}${thinSpace}dB` : '–',
     formatPercent(ratio, { digits: 4 }),
-    phase === null ? '–' : `${formatNumber(Number(phase.toFixed(1)), { digits: 4 })}°`,
+    phase === null ? '–' : `${toTenth(phase)}°`,
   ]
 }
 

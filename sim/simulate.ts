@@ -43,6 +43,11 @@ class Hooks implements Observer {
   }
 }
 
+/** Whether nothing limited the output: without amplitude control such a level is still on its way. */
+function isLinear({ shares }: SettledMeasurement): boolean {
+  return Object.values(shares).every((share) => share === 0)
+}
+
 /** The first of the options that no computation can work with, or null. */
 function optionFault({ duration, sampleInterval }: SimulateOptions): Failure | null {
   if (!(duration > 0 && Number.isFinite(duration)))
@@ -118,10 +123,11 @@ export function simulate(circuit: Circuit, options: SimulateOptions): Simulation
 
   const complete = outcome === 'reachedEnd'
   let settled: SettledMeasurement | null = null
-  if (complete && swings(cycles.list, machine.settings.scale)) {
+  if (complete && linear.starts && swings(cycles.list, machine.settings.scale)) {
     const cuts = cutsPerPeriod(cycles.list)
     const last = cycles.list.at(-1)!
     if (cuts !== null) settled = measureSettled(machine, position, cuts, last.end - last.start)
+    if (settled && circuit.amplitudeControl.kind === 'none' && isLinear(settled)) settled = null
   }
   const ending = {
     circuit,

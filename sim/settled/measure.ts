@@ -8,7 +8,7 @@ import type { Machine, Position } from '#sim/modes/machine.ts'
 import { Columns } from '#sim/record/columns.ts'
 import { Cycles } from '#sim/record/cycles.ts'
 import { Spans } from '#sim/record/spans.ts'
-import { analyseHarmonics, totalHarmonicDistortion } from '#sim/spectrum/harmonics.ts'
+import { analysePair, totalHarmonicDistortion } from '#sim/spectrum/harmonics.ts'
 import type { Mode, SettledTone } from '#sim/types.ts'
 
 /** Harmonics in every THD. */
@@ -67,8 +67,7 @@ export function measureSettled(
   const grid: Position = { ...start, y: [...start.y] }
   if (machine.run(grid, start.t + period, [columns, corners]) !== 'reachedEnd') return null
 
-  const output = analyseHarmonics(columns.vo, 1, harmonicCount)
-  const input = analyseHarmonics(columns.v1, 1, harmonicCount)
+  const [output, input] = analysePair(columns.vo, columns.v1, harmonicCount)
   const share = (mode: Mode) => spans.share(mode, start.t, position.t)
   return {
     tone: {

@@ -30,7 +30,7 @@ export function whyUnsettled(ending: Ending): string {
   if (!linear.starts) {
     const gain = formatNumber(linear.gain, { digits: 6 })
     if (!Number.isFinite(linear.criticalGain))
-      return `It dies out: this amplifier is too slow to sustain the loop at any gain.`
+      return 'It dies out: with this amplifier no closed-loop gain sustains the loop.'
     return `It dies out: a closed-loop gain of ${gain} is not above the critical gain of ${formatNumber(linear.criticalGain, { digits: 6 })}.`
   }
   const last = modes.at(-1)

@@ -15,29 +15,43 @@ export interface HarmonicAnalysis {
   harmonics: Complex[]
 }
 
+function rootMeanSquare(samples: Float64Array): number {
+  return Math.sqrt(samples.reduce((sum, value) => sum + value * value, 0) / samples.length)
+}
+
 /**
- * Analyses `samples` (a power of two of them) that span `periods` whole periods.
- * @throws RangeError when the harmonics asked for lie beyond half the sampling rate
+ * Analyses two signals of equal length (a power of two) that each span one whole period, in one complex transform: with
+ * z = a + jb, the bins of a real pair are A = (Z[k] + Z*[N−k])/2 and B = (Z[k] − Z*[N−k])/2j.
+ * @throws RangeError when `count` harmonics lie beyond half the sampling rate
  */
-export function analyseHarmonics(samples: Float64Array, periods: number, count: number): HarmonicAnalysis {
-  const n = samples.length
-  if (periods * count >= n / 2)
-    throw new RangeError(`${n} samples do not resolve ${count} harmonics of ${periods} periods`)
-  const bins = fft(samples)
-  const harmonics = Array.from({ length: count }, (_, index) => {
-    const [re, im] = bins[(index + 1) * periods]!
-    return { re: (2 * re) / n, im: (2 * im) / n }
-  })
-  const meanSquare = samples.reduce((sum, value) => sum + value * value, 0) / n
-  return { mean: bins[0]![0] / n, rms: Math.sqrt(meanSquare), harmonics }
+export function analysePair(
+  a: Float64Array,
+  b: Float64Array,
+  count: number,
+): [HarmonicAnalysis, HarmonicAnalysis] {
+  const n = a.length
+  if (b.length !== n || 2 * count >= n)
+    throw new RangeError(`${n} and ${b.length} samples do not resolve ${count} harmonics`)
+  const bins = fft(Array.from(a, (value, index): [number, number] => [value, b[index]!]))
+  const first: Complex[] = []
+  const second: Complex[] = []
+  for (let k = 1; k <= count; k++) {
+    const [re, im] = bins[k]!
+    const [mirrorRe, mirrorIm] = bins[n - k]!
+    first.push({ re: (re + mirrorRe) / n, im: (im - mirrorIm) / n })
+    second.push({ re: (im + mirrorIm) / n, im: (mirrorRe - re) / n })
+  }
+  const [meanA, meanB] = bins[0]!
+  return [
+    { mean: meanA / n, rms: rootMeanSquare(a), harmonics: first },
+    { mean: meanB / n, rms: rootMeanSquare(b), harmonics: second },
+  ]
 }
 
 /** THD_F: root sum of squares of the harmonics after the first over the first (IEC 62257-1 vocabulary). */
 export function totalHarmonicDistortion(harmonics: readonly Complex[]): number {
   const [fundamental, ...rest] = harmonics
   if (!fundamental) return NaN
-  return (
-    Math.sqrt(rest.reduce((sum, { re, im }) => sum + re * re + im * im, 0)) /
-    Math.hypot(fundamental.re, fundamental.im)
-  )
+  const squares = rest.reduce((sum, { re, im }) => sum + re * re + im * im, 0)
+  return Math.sqrt(squares) / Math.hypot(fundamental.re, fundamental.im)
 }

@@ -22,8 +22,8 @@ export function Shell() {
       >
         Skip to the page
       </a>
-      <header className="border-b border-line bg-card">
-        <div className="gutter flex h-13 items-stretch gap-2 sm:gap-6">
+      <header className="bg-card">
+        <div className="gutter flex h-13 items-stretch gap-2 border-b border-line sm:gap-6">
           <Link
             to="/designs"
             aria-label="Sinewright, to the designs"
@@ -43,8 +43,8 @@ export function Shell() {
             <AccountMenu />
           </div>
         </div>
+        <DemoBanner />
       </header>
-      <DemoBanner />
       <OfflineBanner />
       <main id="page" tabIndex={-1} className="gutter w-full grow pb-10">
         <Outlet />

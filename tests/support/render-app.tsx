@@ -1,6 +1,7 @@
 /** Mounts the whole client at an address, against a fake server, as `main.tsx` does in a browser. */
 import { render } from '@testing-library/react'
 import userEvent from '@testing-library/user-event'
+import { vi } from 'vitest'
 import { createMemoryRouter, RouterProvider } from 'react-router-dom'
 import { Providers } from '#client/app/providers.tsx'
 import { createRoutes } from '#client/app/router.tsx'
@@ -9,6 +10,8 @@ import { queryClient } from '#client/lib/query-client.ts'
 /** The loaders' own cache, emptied: what one test saw is no answer to the next. */
 export function renderApp(address: string) {
   queryClient.clear()
+  // jsdom has no layout to scroll.
+  vi.spyOn(window, 'scrollTo').mockImplementation(() => undefined)
   const router = createMemoryRouter(createRoutes(queryClient), {
     initialEntries: [address],
     future: { v8_middleware: true },

@@ -1,14 +1,22 @@
+import { useQueryClient } from '@tanstack/react-query'
+import { useEffect } from 'react'
 import { useNavigate, useSearchParams } from 'react-router-dom'
 import { Card } from '#client/components/ui/card.tsx'
 import { PageTitle } from '#client/components/ui/page-title.tsx'
 import { WaveMark } from '#client/components/wave-mark.tsx'
 import { SignInForm } from '#client/features/session/components/sign-in-form.tsx'
+import { setCsrfToken } from '#client/lib/api.ts'
 import { safeNext } from '#client/lib/next-path.ts'
 
-/** The door. After it, the page that was asked for. */
+/** The door. Nothing of whoever was here before stays in memory; after it comes the page that was asked for. */
 export function SignInPage() {
   const [search] = useSearchParams()
   const navigate = useNavigate()
+  const queryClient = useQueryClient()
+  useEffect(() => {
+    setCsrfToken(null)
+    queryClient.clear()
+  }, [queryClient])
   return (
     <main
       tabIndex={-1}

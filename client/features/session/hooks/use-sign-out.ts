@@ -1,12 +1,11 @@
-import { useMutation, useQueryClient } from '@tanstack/react-query'
+import { useMutation } from '@tanstack/react-query'
 import { useNavigate } from 'react-router-dom'
 import { useStatus } from '#client/components/ui/status.tsx'
-import { api, ApiError, setCsrfToken } from '#client/lib/api.ts'
+import { api, ApiError } from '#client/lib/api.ts'
 import { problemSentence } from '#client/lib/form-problem.ts'
 
-/** Ends this browser's session, or every session of the person. Nothing of the session stays in the cache. */
+/** Ends this browser's session, or every session of the person. The sign-in page then empties the cache. */
 export function useSignOut() {
-  const queryClient = useQueryClient()
   const navigate = useNavigate()
   const say = useStatus()
   return useMutation({
@@ -19,9 +18,7 @@ export function useSignOut() {
       }
     },
     onSuccess: async (_, where) => {
-      setCsrfToken(null)
       await navigate('/sign-in')
-      queryClient.clear()
       say(where === 'here' ? 'Signed out.' : 'Signed out everywhere.')
     },
     onError: (error) => say(`Not signed out: ${problemSentence(error)}`),

@@ -46,5 +46,10 @@ export async function sendCsv(response: Response, { row, bytes }: StoredRecord):
   const { buffer } = Uint8Array.from(await unpack(bytes))
   const columns = decodeColumns(buffer, layout.columns.length)
   response.attachment(downloadName(row.title, row.id)).type('text/csv')
-  await pipeline(Readable.from(csvChunks(layout, columns)), response)
+  await pipeline(Readable.from(csvChunks(layout, columns)), response).catch(
+    (error: NodeJS.ErrnoException) => {
+      // The reader left in the middle: nobody is there to be told.
+      if (error.code !== 'ERR_STREAM_PREMATURE_CLOSE') throw error
+    },
+  )
 }

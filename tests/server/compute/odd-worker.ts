@@ -1,4 +1,4 @@
-/** A worker that misbehaves on demand: `timing.duration` says how. */
+/** A worker that misbehaves on demand: `timing.duration` in seconds says how. */
 import type { RunInputs } from '#shared/schemas/simulation.ts'
 
 export const behaviours = { answer: 1, die: 2, throw: 3, hang: 4 }

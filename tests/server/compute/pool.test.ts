@@ -1,18 +1,9 @@
 /** The pool against worker threads that hang, die and break: real threads throughout. */
-import { fileURLToPath } from 'node:url'
 import { afterEach, describe, expect, it } from 'vitest'
 import { BusyError, ComputeError, createCompute, type Compute } from '#server/compute/index.ts'
-import { findWorkerFile } from '#server/compute/worker-file.ts'
 import type { RunInputs } from '#shared/schemas/simulation.ts'
 import { startingDraft } from '#shared/starting-draft.ts'
-import { behaviours } from '#tests/server/compute/odd-worker.ts'
-
-const { execArgv } = findWorkerFile()
-const worker = (name: string) => ({
-  filename: fileURLToPath(new URL(`./${name}.ts`, import.meta.url)),
-  execArgv,
-})
-const oddWorker = worker('odd-worker')
+import { behaviours, brokenWorker, oddWorker } from '#tests/server/compute/worker-files.ts'
 
 const asked = (behaviour: keyof typeof behaviours): RunInputs => ({
   circuit: startingDraft.circuit,
@@ -65,7 +56,7 @@ describe('compute.run', () => {
   })
 
   it('reports a thread that cannot start, every time anew', async () => {
-    compute = createCompute({ threads: 1, worker: worker('broken-worker') })
+    compute = createCompute({ threads: 1, worker: brokenWorker })
     await expect(compute.run(asked('answer'))).rejects.toThrow(ComputeError)
     await expect(compute.run(asked('answer'))).rejects.toThrow(ComputeError)
   })

@@ -8,6 +8,8 @@ import type { CreateRun } from '#shared/schemas/run.ts'
 import type { RunInputs } from '#shared/schemas/simulation.ts'
 import { startingDraft } from '#shared/starting-draft.ts'
 import { gzipSync } from 'node:zlib'
+import type { Session } from '#shared/schemas/account.ts'
+import { testPassword } from '#tests/support/factories.ts'
 import type { TestServer } from '#tests/support/server.ts'
 
 /** A few periods of the starting circuit: computed in some milliseconds. */
@@ -30,9 +32,10 @@ export function storeRun(
   { context }: TestServer,
   design: Design,
   author: Person,
-  { title = 'A stored run', note = '' } = {},
+  { title = 'A stored run', note = '', samples = 3 } = {},
 ): Promise<number> {
-  const columns = [Float64Array.of(0, 1, -1), Float64Array.of(0, 0.5, -0.5)]
+  const output = Float64Array.from({ length: samples }, (_, index) => Math.sin(index))
+  const columns = [output, output.map((value) => value / 3)]
   const computed = {
     kind: 'computed' as const,
     engineVersion: '0.0.0-test',
@@ -41,7 +44,7 @@ export function storeRun(
     unsettled: null,
     record: {
       sampleInterval: 1e-6,
-      samples: 3,
+      samples,
       columns: [
         { name: 'output', unit: 'V' },
         { name: 'network node', unit: 'V' },
@@ -53,4 +56,12 @@ export function storeRun(
   return context.database.write((transaction) =>
     runsRepository(context).create(body, computed, author.id, context.clock(), transaction),
   )
+}
+
+/** Headers of an engineer's requests, for connections that a test opens and cuts by itself. */
+export async function engineersHeaders(server: TestServer): Promise<Record<string, string>> {
+  const { email } = await server.createPerson('engineer')
+  const answer = await server.agent().post('/api/session', { email, password: testPassword })
+  const [cookie] = answer.get('Set-Cookie')![0]!.split(';')
+  return { Cookie: cookie!, 'X-CSRF-Token': (answer.body as Session).csrfToken }
 }

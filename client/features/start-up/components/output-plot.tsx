@@ -6,7 +6,7 @@ import { OverviewStrip } from '#client/components/charts/overview-strip.tsx'
 import { PlotCard, type KeyItem } from '#client/components/charts/plot-card.tsx'
 import { waveformTable } from '#client/components/charts/plot-table.ts'
 import { saveText, spanCsv } from '#client/components/charts/span-csv.ts'
-import { WaveformChart } from '#client/components/charts/waveform-chart.tsx'
+import { WaveformChart, wholeView } from '#client/components/charts/waveform-chart.tsx'
 import { Button } from '#client/components/ui/button.tsx'
 import { Checkbox } from '#client/components/ui/checkbox.tsx'
 import { startUpSeries, type SeriesChoice } from '#client/features/start-up/lib/start-up-series.ts'
@@ -29,6 +29,8 @@ export function OutputPlot({ simulation, spans, ...rest }: OutputPlotProps) {
   const [saving, setSaving] = useState(false)
   const series = useMemo(() => startUpSeries(simulation, choice), [simulation, choice])
   const overview = useMemo(() => startUpSeries(simulation, { node: false, control: false }), [simulation])
+  const whole = wholeView(overview, sampleInterval)
+  const isWhole = view[0] === whole[0] && view[1] === whole[1]
   const timeTo90 = figures?.timeTo90 ?? null
   const marks = useMemo(
     () =>
@@ -86,9 +88,15 @@ export function OutputPlot({ simulation, spans, ...rest }: OutputPlotProps) {
             onChange={(event) => setChoice({ ...choice, control: event.target.checked })}
           />
         )}
-        <span className="ml-auto">
-          Drag to zoom, click to place a cursor, double-click for the whole record.
+        <span className="ml-auto pointer-coarse:hidden">
+          Drag to zoom, click to place a cursor, Shift-drag to move.
         </span>
+        <span className="ml-auto hidden pointer-coarse:inline">
+          Drag to move, tap to place a cursor, drag the strip’s edges to zoom.
+        </span>
+        <Button variant="quiet" disabled={isWhole} onClick={() => onViewChange(whole)}>
+          Whole record
+        </Button>
       </div>
     </PlotCard>
   )

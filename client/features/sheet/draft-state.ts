@@ -1,13 +1,8 @@
 /** The draft being edited: what was typed, what of it is valid, and the way back. */
+import type { RefusedText } from '#client/components/circuit/quantity-input.tsx'
 import type { Change } from '#client/features/sheet/sheet.ts'
 import * as history from '#client/features/sheet/history.ts'
 import { draftContentSchema, type DraftContent } from '#shared/schemas/simulation.ts'
-
-/** Text in a field that could not be read as a number, and why. */
-export interface RefusedText {
-  text: string
-  sentence: string
-}
 
 /** What the fields show. `content` may break the schema's rules; fields with refused text keep their last number. */
 export interface Working {

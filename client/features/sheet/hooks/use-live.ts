@@ -8,11 +8,16 @@ import type { Failure, SmallSignal } from '#sim/types.ts'
 interface LiveState {
   smallSignal: SmallSignal | null
   record: RecordResult | null
-  /** What `record`, `failure` and `progress` belong to. */
+  /** What `record` and `failure` belong to. */
   recordOf: RunInputs | null
   failedFor: RunInputs | null
   failure: Failure | null
+  /** Share done; null while nothing is computed. */
   progress: number | null
+  /** Counts what the person asked to compute after having given it up. */
+  attempt: number
+  /** Ends the computation under way. */
+  cancel: () => void
 }
 
 const nothingYet: LiveState = {
@@ -22,6 +27,8 @@ const nothingYet: LiveState = {
   failedFor: null,
   failure: null,
   progress: null,
+  attempt: 0,
+  cancel: () => undefined,
 }
 
 const merge = (state: LiveState, change: Partial<LiveState>): LiveState => ({ ...state, ...change })
@@ -38,6 +45,7 @@ export function useLive(inputs: RunInputs): LiveResult {
   const engine = useEngine()
   const [state, change] = useReducer(merge, nothingYet)
   const { circuit } = inputs
+  const { attempt } = state
 
   useEffect(() => {
     let current = true
@@ -52,10 +60,15 @@ export function useLive(inputs: RunInputs): LiveResult {
   }, [engine, circuit])
 
   useEffect(() => {
+    // An edit does not abort its predecessor: the engine decides whether that one may still finish.
+    const controller = new AbortController()
     let current = true
-    change({ progress: 0, failure: null, failedFor: null })
-    const ended = (failure: Failure) => change({ failure, failedFor: inputs, progress: null })
-    engine.run(inputs, { onProgress: (done) => current && change({ progress: done }) }).then(
+    const ended = (failure: Failure | null) => change({ failure, failedFor: inputs, progress: null })
+    const onProgress = (done: number) => {
+      if (current && !controller.signal.aborted) change({ progress: done })
+    }
+    change({ progress: 0, failure: null, failedFor: null, cancel: () => controller.abort() })
+    engine.run(inputs, { onProgress, signal: controller.signal }).then(
       (answer) => {
         // An older record is still the latest one there is: shown, marked as stale, until its successor comes.
         if (!isFailure(answer))
@@ -63,11 +76,11 @@ export function useLive(inputs: RunInputs): LiveResult {
         else if (current) ended(answer)
       },
       (error: unknown) => {
-        if (current && !isAbort(error)) ended(broken(error))
+        if (current) ended(isAbort(error) ? null : broken(error))
       },
     )
     return () => void (current = false)
-  }, [engine, inputs])
+  }, [engine, inputs, attempt])
 
   return useMemo(
     () => ({
@@ -77,6 +90,8 @@ export function useLive(inputs: RunInputs): LiveResult {
       stale: state.recordOf !== inputs,
       progress: state.progress,
       failure: state.failedFor === inputs ? state.failure : null,
+      cancel: state.cancel,
+      resume: () => change({ attempt: state.attempt + 1 }),
     }),
     [state, inputs],
   )

@@ -1,6 +1,7 @@
 /** Everything a design sheet holds: the draft being edited, what is computed from it, and how it is saved. */
 import { useCallback, useMemo, useReducer } from 'react'
-import { beginDraft, draftReducer, refusals, type RefusedText } from '#client/features/sheet/draft-state.ts'
+import type { RefusedText } from '#client/components/circuit/quantity-input.tsx'
+import { beginDraft, draftReducer, refusals } from '#client/features/sheet/draft-state.ts'
 import { fieldError, fieldOf, type FieldName } from '#client/features/sheet/fields.ts'
 import { useAutosave, type DraftSaving } from '#client/features/sheet/hooks/use-autosave.ts'
 import { useLive } from '#client/features/sheet/hooks/use-live.ts'

@@ -1,0 +1,26 @@
+import { NavLink } from 'react-router-dom'
+
+export interface SheetPage {
+  to: string
+  name: string
+  /** What the user asks there. */
+  question: string
+}
+
+/** The pages of a design, each with its question. */
+export function PageTabs({ pages }: { pages: readonly SheetPage[] }) {
+  return (
+    <nav aria-label="Design" className="flex gap-1 border-b border-line">
+      {pages.map(({ to, name, question }) => (
+        <NavLink
+          key={to}
+          to={to}
+          className="-mb-px border-b-3 border-transparent px-4 pt-1.5 pb-2 text-soft no-underline hover:text-ink aria-[current=page]:border-copper aria-[current=page]:text-ink"
+        >
+          <span className="block font-medium">{name}</span>
+          <span className="block text-sm text-soft">{question}</span>
+        </NavLink>
+      ))}
+    </nav>
+  )
+}

@@ -1,0 +1,108 @@
+/** The answer in a sentence: does it start, how fast, and what stops the growth? */
+import { criticalFeedback } from '#client/features/sheet/trim.ts'
+import type { Figures } from '#shared/figures.ts'
+import type { Circuit } from '#shared/schemas/circuit.ts'
+import { formatPercent, formatQuantity } from '#shared/units/format.ts'
+import type { SmallSignal } from '#sim/types.ts'
+
+export interface Phrase {
+  text: string
+  /** How it is set: the verdict itself, a figure, or what limits. */
+  mark?: 'good' | 'bad' | 'strong' | 'limit'
+}
+
+/** What is known of the record: its figures, or that there is none yet. */
+export interface RecordFacts {
+  figures: Figures | null
+  /** s. */
+  duration: number
+}
+
+const percent = (ratio: number) => formatPercent(ratio, { digits: 2 })
+
+/** A share of the settled time that is worth a word. */
+const noticeable = 1e-4
+
+function holder(circuit: Circuit, figures: Figures): { who: string; how: string } | null {
+  const share = (...keys: ('heldHigh' | 'heldLow' | 'slewUp' | 'slewDown')[]) =>
+    keys.reduce((sum, key) => sum + (figures[key] ?? 0), 0)
+  const held = share('heldHigh', 'heldLow') > noticeable
+  const kind = circuit.amplitudeControl.kind
+  if (kind !== 'none' && !held)
+    return kind === 'lamp'
+      ? { who: 'lamp', how: 'holds the level' }
+      : { who: 'diodes', how: 'hold the level' }
+  if (held) {
+    const only = share('heldLow') <= noticeable ? 'upper ' : share('heldHigh') <= noticeable ? 'lower ' : ''
+    return only ? { who: `${only}rail`, how: 'stops the growth' } : { who: 'rails', how: 'stop the growth' }
+  }
+  if (share('slewUp', 'slewDown') > noticeable) return { who: 'slew rate', how: 'stops the growth' }
+  return null
+}
+
+/** Growth of the envelope in one cycle, as a ratio: 0.06 is 6 % a cycle. */
+export function growthPerCycle({ growthRate, frequency }: SmallSignal): number {
+  return Math.expm1(growthRate / frequency)
+}
+
+function whenItStarts(linear: SmallSignal, circuit: Circuit, record: RecordFacts | null): Phrase[] {
+  const lead: Phrase = { text: 'It starts.', mark: 'good' }
+  const excess = ` The loop exceeds its critical gain by ${percent(linear.gainMargin)}`
+  if (linear.frequency === 0)
+    return [
+      { text: 'It runs to a rail.', mark: 'bad' },
+      {
+        text: `${excess}, so far that it does not ring: the output leaves for a rail without oscillating. Lower feedback R.`,
+      },
+    ]
+  const grows = `${excess}, grows ${percent(growthPerCycle(linear))} a cycle`
+  const figures = record?.figures
+  if (!record || !figures) return [lead, { text: `${grows}.` }]
+  if (figures.timeTo90 === null)
+    return [
+      lead,
+      {
+        text: `${grows} and has not settled within the record of ${formatQuantity(record.duration, 's', { digits: 3 })}.`,
+      },
+    ]
+  const limit = holder(circuit, figures)
+  return [
+    lead,
+    { text: `${grows} and reaches its level after ` },
+    { text: formatQuantity(figures.timeTo90, 's', { digits: 3 }), mark: 'strong' },
+    ...(limit
+      ? [{ text: '; the ' }, { text: limit.who, mark: 'limit' as const }, { text: ` ${limit.how}.` }]
+      : [{ text: '.' }]),
+  ]
+}
+
+function whenItDoesNot(linear: SmallSignal, circuit: Circuit): Phrase[] {
+  const lead: Phrase = { text: 'It does not start.', mark: 'bad' }
+  const critical = criticalFeedback(circuit, linear)
+  if (critical === null)
+    return [
+      lead,
+      { text: ' No gain sustains this loop with this amplifier: it is too slow for the network.' },
+    ]
+  const missing = linear.criticalGain / linear.gain - 1
+  const fade = linear.growthRate < 0 ? Math.LN2 / -linear.growthRate : null
+  return [
+    lead,
+    { text: ` The loop lacks ${percent(missing)} of gain` },
+    {
+      text:
+        fade === null
+          ? '; '
+          : `, and a disturbance halves every ${formatQuantity(fade, 's', { digits: 2 })}; `,
+    },
+    { text: `feedback R above ${formatQuantity(critical, 'Ω')}`, mark: 'strong' },
+    { text: ' would carry it over the critical gain.' },
+  ]
+}
+
+/** @param record null until the first record, or when it belongs to earlier values */
+export function verdict(linear: SmallSignal, circuit: Circuit, record: RecordFacts | null): Phrase[] {
+  return linear.starts ? whenItStarts(linear, circuit, record) : whenItDoesNot(linear, circuit)
+}
+
+export const verdictText = (phrases: readonly Phrase[]) => phrases.map((phrase) => phrase.text).join('')

@@ -41,14 +41,18 @@ function plain(value: number, digits: number): string {
   return text.includes('e') ? value.toExponential(digits - 1) : text
 }
 
-/** A value in SI units as engineering number and prefixed unit: 989.69 Hz, 2.2 kΩ, −1.5 mV. */
+/**
+ * A value in SI units as engineering number and prefixed unit: 989.69 Hz, 2.2 kΩ, −1.5 mV. A unit that begins with
+ * `1/` takes no prefix: k1/s would say nothing.
+ */
 export function quantityParts(value: number, unit: string, options: FormatOptions = {}): QuantityParts {
   const { digits = 4, signed = false } = options
   if (Number.isNaN(value)) return { number: '–', unit }
   if (!Number.isFinite(value)) return { number: withSign(value < 0 ? '-∞' : '∞', signed), unit }
   if (value === 0) return { number: '0', unit }
   const rounded = Number(value.toPrecision(digits))
-  const exponent = Math.min(12, Math.max(-18, Math.floor(Math.log10(Math.abs(rounded)) / 3 + 1e-12) * 3))
+  const decade = Math.floor(Math.log10(Math.abs(rounded)) / 3 + 1e-12) * 3
+  const exponent = unit.startsWith('1/') ? 0 : Math.min(12, Math.max(-18, decade))
   return {
     number: withSign(plain(rounded / 10 ** exponent, digits), signed),
     unit: `${prefixes[exponent] ?? ''}${unit}`,

@@ -14,6 +14,11 @@ describe('formatFigure', () => {
     expect(formatFigure('thd', null)).toBe('–')
   })
 
+  it('gives a rate no prefix', () => {
+    expect(formatFigure('growthRate', 6184.45)).toBe('6184\u20091/s')
+    expect(formatFigure('growthRate', -0.0125)).toBe('\u22120.0125\u20091/s')
+  })
+
   it('passes options on', () => {
     expect(formatFigure('level', 0.25, { signed: true, digits: 2 })).toBe('+250\u2009mV')
   })

@@ -16,7 +16,7 @@ import { formatMoment } from '#client/lib/dates.ts'
 import type { Run } from '#shared/schemas/run.ts'
 
 function RunCard({ letter, run }: { letter: 'A' | 'B'; run: Run }) {
-  const edge = letter === 'A' ? 'border-l-petrol' : 'border-l-copper [border-left-style:dashed]'
+  const edge = letter === 'A' ? 'border-l-petrol' : 'border-l-copper'
   return (
     <Card className={`border-l-4 px-4 py-3 ${edge}`}>
       <p className="wrap-anywhere">

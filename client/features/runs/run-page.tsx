@@ -15,7 +15,7 @@ import { InputsSection } from '#client/features/runs/components/inputs-section.t
 import { RecordViewer } from '#client/features/runs/components/record-viewer.tsx'
 import { ReplaySection } from '#client/features/runs/components/replay-section.tsx'
 import { RunFacts } from '#client/features/runs/components/run-facts.tsx'
-import { useReplay } from '#client/features/runs/hooks/use-replay.ts'
+import { useReplay, type FoundReplay } from '#client/features/runs/hooks/use-replay.ts'
 import { useRunRecord } from '#client/features/runs/hooks/use-run-record.ts'
 import { mayDelete } from '#client/features/runs/lib/policy.ts'
 import { exportUrl, runQueries } from '#client/features/runs/queries.ts'
@@ -56,14 +56,28 @@ function RunHeader({ run }: { run: Run }) {
   )
 }
 
+/** Figures, harmonics and inputs; with a replay the figures need the whole width. */
+function Numbers({ run, found }: { run: Run; found: FoundReplay | null }) {
+  return (
+    <div className="grid items-start gap-4 lg:grid-cols-2">
+      <div className={found ? 'min-w-0 lg:col-span-2' : 'min-w-0'}>
+        <FiguresSection run={run} replayed={found?.comparison.figures ?? null} />
+      </div>
+      {found?.tone && <HarmonicsSection tone={found.tone} />}
+      <InputsSection inputs={run.inputs} />
+    </div>
+  )
+}
+
 /** All that needs the record: without its samples there is nothing to draw and nothing to compare a replay with. */
 function RecordParts({ run, columns }: { run: Run; columns: readonly Float64Array[] }) {
   const replay = useReplay(run, columns)
+  const found = replay.state.kind === 'compared' ? replay.state : null
   return (
     <>
       <ReplaySection run={run} replay={replay} />
       <RecordViewer run={run} columns={columns} />
-      {replay.state.kind === 'compared' && replay.state.tone && <HarmonicsSection tone={replay.state.tone} />}
+      <Numbers run={run} found={found} />
     </>
   )
 }
@@ -83,13 +97,14 @@ export function RunPage({ runId }: { runId: number }) {
       <RunHeader run={run} />
       <div className="space-y-4">
         <RunFacts run={run} />
-        {columns && <RecordParts run={run} columns={columns} />}
-        {!columns &&
-          (error ? <ErrorState error={error} retry={retry} /> : <Loading label="Loading the record" />)}
-        <div className="grid items-start gap-4 lg:grid-cols-2">
-          <FiguresSection figures={run.figures} unsettled={run.unsettled} />
-          <InputsSection inputs={run.inputs} />
-        </div>
+        {columns ? (
+          <RecordParts run={run} columns={columns} />
+        ) : (
+          <>
+            {error ? <ErrorState error={error} retry={retry} /> : <Loading label="Loading the record" />}
+            <Numbers run={run} found={null} />
+          </>
+        )}
       </div>
     </>
   )

@@ -4,11 +4,10 @@ import { Checkbox } from '#client/components/ui/checkbox.tsx'
 import { Section } from '#client/features/runs/components/section.tsx'
 import { Cell, GroupRow, PlainTable, RowHead } from '#client/features/runs/components/table-parts.tsx'
 import { compareFigures, compareInputs } from '#client/features/runs/lib/compare-runs.ts'
-import { formatDifference } from '#client/features/runs/lib/format-difference.ts'
+import { formatDifference, formatShare } from '#client/features/runs/lib/format-difference.ts'
 import { figure } from '#shared/figures.ts'
 import type { Run } from '#shared/schemas/run.ts'
 import { formatFigure } from '#shared/units/format-figure.ts'
-import { formatPercent } from '#shared/units/format.ts'
 
 const digits = 5
 
@@ -22,13 +21,7 @@ export function CompareFigures({ a, b }: { a: Run; b: Run }) {
             <Cell>{formatFigure(pair.key, pair.a, { digits })}</Cell>
             <Cell>{formatFigure(pair.key, pair.b, { digits })}</Cell>
             <Cell>{formatDifference(pair.key, pair.difference, true)}</Cell>
-            <Cell>
-              {pair.relative === null
-                ? '–'
-                : pair.relative === 0
-                  ? '0'
-                  : formatPercent(pair.relative, { digits: 3, signed: true })}
-            </Cell>
+            <Cell>{formatShare(pair.relative, { digits: 3, signed: true })}</Cell>
           </tr>
         ))}
       </PlainTable>
@@ -57,15 +50,21 @@ export function CompareInputs({ a, b }: { a: Run; b: Run }) {
         />
       }
     >
-      <PlainTable caption="Inputs of both runs" heads={['Input', 'A', 'B', 'Differs']}>
+      <PlainTable caption="Inputs of both runs" heads={['Input', 'A', 'B']}>
         {shown.map((pair, index) => (
           <Fragment key={`${pair.group} ${pair.name}`}>
-            {pair.group !== shown[index - 1]?.group && <GroupRow columns={4}>{pair.group}</GroupRow>}
+            {pair.group !== shown[index - 1]?.group && <GroupRow columns={3}>{pair.group}</GroupRow>}
             <tr className={pair.differs ? 'bg-copper-wash' : undefined}>
-              <RowHead>{pair.name}</RowHead>
-              <Cell strong={pair.differs}>{pair.a ?? '–'}</Cell>
-              <Cell strong={pair.differs}>{pair.b ?? '–'}</Cell>
-              <Cell>{pair.differs && <span className="text-copper">≠ differs</span>}</Cell>
+              <RowHead>
+                {pair.name}
+                {pair.differs && <span className="ml-2 whitespace-nowrap text-copper">≠ differs</span>}
+              </RowHead>
+              <Cell strong={pair.differs} wrap>
+                {pair.a ?? '–'}
+              </Cell>
+              <Cell strong={pair.differs} wrap>
+                {pair.b ?? '–'}
+              </Cell>
             </tr>
           </Fragment>
         ))}

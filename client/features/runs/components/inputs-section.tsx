@@ -15,7 +15,7 @@ export function InputsSection({ inputs }: { inputs: RunInputs }) {
             {row.group !== rows[index - 1]?.group && <GroupRow columns={2}>{row.group}</GroupRow>}
             <tr>
               <RowHead>{row.name}</RowHead>
-              <Cell>{row.text}</Cell>
+              <Cell wrap>{row.text}</Cell>
             </tr>
           </Fragment>
         ))}

@@ -71,7 +71,7 @@ export function PlayheadBar(props: PlayheadBarProps) {
         <Button variant="quiet" onClick={props.onCloseUp}>
           Zoom in here
         </Button>
-        <Field label="Speed" labelHidden className="ml-auto min-w-0 basis-72 max-sm:grow">
+        <Field label="Speed" labelHidden className="ml-auto min-w-0 basis-88 max-sm:grow">
           <Select value={speed} onChange={(event) => props.onSpeed(Number(event.target.value))}>
             {speeds.map((choice) => (
               <option key={choice} value={choice}>

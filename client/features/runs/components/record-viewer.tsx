@@ -105,6 +105,9 @@ export function RecordViewer({ run, columns }: RecordViewerProps) {
           view={view}
           onViewChange={(next) => change({ view: next })}
         />
+        <p className="px-2 pt-1.5 text-right text-sm text-soft">
+          Drag to zoom, click to place a cursor, double-click for the whole record.
+        </p>
       </PlotCard>
     </div>
   )

@@ -1,36 +1,10 @@
 import { Notice } from '#client/components/ui/notice.tsx'
 import { Cell, Outcome, PlainTable, RowHead } from '#client/features/runs/components/table-parts.tsx'
-import { formatDifference } from '#client/features/runs/lib/format-difference.ts'
+import { formatShare } from '#client/features/runs/lib/format-difference.ts'
 import { replayVerdict } from '#client/features/runs/lib/replay-verdict.ts'
-import { figure } from '#shared/figures.ts'
 import { waveformTolerance, type ReplayComparison } from '#shared/replay.ts'
 import type { RecordLayout } from '#shared/schemas/run.ts'
-import { formatFigure } from '#shared/units/format-figure.ts'
 import { formatPercent, formatQuantity } from '#shared/units/format.ts'
-
-const digits = 7
-
-function FigureRows({ comparison }: { comparison: ReplayComparison }) {
-  return (
-    <PlainTable
-      caption="Stored and replayed figures"
-      heads={['Figure', 'Stored', 'Replayed', 'Difference', 'Tolerance', 'Outcome']}
-    >
-      {comparison.figures.map((row) => (
-        <tr key={row.key} className={row.passes ? undefined : 'bg-bad-wash'}>
-          <RowHead>{figure(row.key).name}</RowHead>
-          <Cell>{formatFigure(row.key, row.stored, { digits })}</Cell>
-          <Cell>{formatFigure(row.key, row.replayed, { digits })}</Cell>
-          <Cell>{formatDifference(row.key, row.difference, true)}</Cell>
-          <Cell>{row.tolerance === null ? '–' : `± ${formatDifference(row.key, row.tolerance)}`}</Cell>
-          <Cell>
-            <Outcome passes={row.passes} />
-          </Cell>
-        </tr>
-      ))}
-    </PlainTable>
-  )
-}
 
 function WaveformRows({ comparison, layout }: { comparison: ReplayComparison; layout: RecordLayout }) {
   return (
@@ -45,7 +19,7 @@ function WaveformRows({ comparison, layout }: { comparison: ReplayComparison; la
             <RowHead>{name}</RowHead>
             <Cell>{formatQuantity(row.deviation, unit, { digits: 3 })}</Cell>
             <Cell>{row.deviation === 0 ? '–' : formatQuantity(row.time, 's', { digits: 5 })}</Cell>
-            <Cell>{row.deviation === 0 ? '0' : formatPercent(row.relative, { digits: 2 })}</Cell>
+            <Cell>{formatShare(row.relative)}</Cell>
             <Cell>{formatPercent(waveformTolerance)} of its peak</Cell>
             <Cell>
               <Outcome passes={row.passes} />
@@ -65,7 +39,7 @@ export interface ReplayResultProps {
   replayedVersion: string
 }
 
-/** What a replay found: verdict, versions, then every figure and waveform. */
+/** What a replay found: verdict, versions and every waveform. The figures stand in a table of their own. */
 export function ReplayResult({ comparison, layout, storedVersion, replayedVersion }: ReplayResultProps) {
   const verdict = replayVerdict(comparison, layout)
   const versions =
@@ -80,7 +54,6 @@ export function ReplayResult({ comparison, layout, storedVersion, replayedVersio
         </p>
       </Notice>
       {comparison.columns && <WaveformRows comparison={comparison} layout={layout} />}
-      <FigureRows comparison={comparison} />
     </div>
   )
 }

@@ -73,7 +73,12 @@ export function runColumns(picking: Picking): ColumnDef<RunSummary, unknown>[] {
       meta: { align: 'end' },
       cell: ({ row }) => <Figure run={row.original} name={name} />,
     })),
-    { id: 'author', header: 'Saved by', enableSorting: true, cell: ({ row }) => row.original.author.name },
+    {
+      id: 'author',
+      header: 'Saved by',
+      enableSorting: true,
+      cell: ({ row }) => <span className="whitespace-nowrap">{row.original.author.name}</span>,
+    },
     {
       id: 'createdAt',
       header: 'Saved',

@@ -39,11 +39,19 @@ export function RowHead({ children, note }: { children: ReactNode; note?: string
   )
 }
 
-export function Cell({ children, strong = false }: { children: ReactNode; strong?: boolean }) {
+export interface CellProps {
+  children: ReactNode
+  strong?: boolean
+  /** For words, which may break; numbers stay on one line. */
+  wrap?: boolean
+}
+
+export function Cell({ children, strong = false, wrap = false }: CellProps) {
   return (
     <td
       className={classNames(
-        'px-4 py-1.5 text-right align-baseline whitespace-nowrap',
+        'px-4 py-1.5 text-right align-baseline',
+        !wrap && 'whitespace-nowrap',
         strong && 'font-medium',
       )}
     >

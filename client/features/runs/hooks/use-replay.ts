@@ -5,12 +5,20 @@ import { compareReplay, type ReplayComparison } from '#shared/replay.ts'
 import type { Run } from '#shared/schemas/run.ts'
 import type { SettledTone, Simulation } from '#sim/types.ts'
 
+/** What a finished replay found. */
+export interface FoundReplay {
+  kind: 'compared'
+  comparison: ReplayComparison
+  engineVersion: string
+  tone: SettledTone | null
+}
+
 export type ReplayState =
   | { kind: 'idle' }
   /** `done`: share of the record computed, 0…1. */
   | { kind: 'computing'; done: number }
   | { kind: 'failed'; sentence: string }
-  | { kind: 'compared'; comparison: ReplayComparison; engineVersion: string; tone: SettledTone | null }
+  | FoundReplay
 
 export interface Replay {
   state: ReplayState

@@ -1,6 +1,6 @@
 import { figure, type FigureKey } from '#shared/figures.ts'
 import { formatFigure } from '#shared/units/format-figure.ts'
-import { thinSpace } from '#shared/units/format.ts'
+import { formatPercent, thinSpace } from '#shared/units/format.ts'
 
 const superscripts: Record<string, string> = {
   '-': '⁻',
@@ -24,6 +24,18 @@ function powerOfTen(value: number): string {
   return `${mantissa.replace('-', '−')} × 10${raised}`
 }
 
+/** A ratio in per cent, two digits or three, as a power of ten where it is tiny. */
+export function formatShare(
+  ratio: number | null,
+  options: { digits?: number; signed?: boolean } = {},
+): string {
+  if (ratio === null) return '–'
+  if (ratio === 0) return '0'
+  const { digits = 2, signed = false } = options
+  if (Math.abs(ratio * 100) >= smallest) return formatPercent(ratio, { digits, signed })
+  return `${signed && ratio > 0 ? '+' : ''}${powerOfTen(ratio * 100)}${thinSpace}%`
+}
+
 /**
  * A small difference or tolerance of a figure, in the figure's own way of being shown: two digits; what has no SI
  * prefix to shrink into becomes a power of ten.
@@ -31,10 +43,9 @@ function powerOfTen(value: number): string {
 export function formatDifference(key: FigureKey, value: number | null, signed = false): string {
   if (value === null) return '–'
   if (value === 0) return '0'
-  const { shownAs } = figure(key)
-  const shown = shownAs === 'percent' ? value * 100 : value
-  if (shownAs === 'quantity' || Math.abs(shown) >= smallest)
-    return formatFigure(key, value, { digits: 2, signed })
-  const sign = signed && value > 0 ? '+' : ''
-  return `${sign}${powerOfTen(shown)}${shownAs === 'percent' ? `${thinSpace}%` : ''}`
+  const { shownAs, unit } = figure(key)
+  if (shownAs === 'percent') return formatShare(value, { signed })
+  const prefixed = shownAs === 'quantity' && !unit.startsWith('1/')
+  if (prefixed || Math.abs(value) >= smallest) return formatFigure(key, value, { digits: 2, signed })
+  return `${signed && value > 0 ? '+' : ''}${powerOfTen(value)}${unit && thinSpace + unit}`
 }

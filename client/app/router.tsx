@@ -15,6 +15,7 @@ const pages: RouteObject[] = [
     children: [
       {
         index: true,
+        element: null,
         loader: ({ request }) => redirect(`${new URL(request.url).pathname.replace(/\/$/, '')}/start-up`),
       },
       { path: 'start-up', lazy: () => import('#client/app/routes/start-up.tsx') },
@@ -44,7 +45,7 @@ export function createRoutes(queryClient: QueryClient): RouteObject[] {
           // Without a loader of its own the guard would not run for pages that load nothing.
           loader: () => null,
           children: [
-            { path: '/', loader: () => redirect('/designs') },
+            { path: '/', element: null, loader: () => redirect('/designs') },
             { ErrorBoundary: RouteError, children: pages },
           ],
         },

@@ -1,11 +1,14 @@
 /** Mounts the whole client at an address, against a fake server, as `main.tsx` does in a browser. */
-import { render } from '@testing-library/react'
+import { configure, render } from '@testing-library/react'
 import userEvent from '@testing-library/user-event'
 import { vi } from 'vitest'
 import { createMemoryRouter, RouterProvider } from 'react-router-dom'
 import { Providers } from '#client/app/providers.tsx'
 import { createRoutes } from '#client/app/router.tsx'
 import { queryClient } from '#client/lib/query-client.ts'
+
+// Pages are separate files, read when first opened: on a busy machine that takes a while.
+configure({ asyncUtilTimeout: 8000 })
 
 /** The loaders' own cache, emptied: what one test saw is no answer to the next. */
 export function renderApp(address: string) {

@@ -1,6 +1,7 @@
 /** A modal dialog (radix): traps focus, closes with Escape, gives focus back. */
 import { Dialog as Radix, VisuallyHidden } from 'radix-ui'
 import type { ReactNode } from 'react'
+import { useOpener } from '#client/components/ui/use-opener.ts'
 
 export interface DialogProps {
   title: string
@@ -36,6 +37,7 @@ export function Dialog({
   footer,
   stay = false,
 }: DialogProps) {
+  const giveBack = useOpener(open)
   const hold = (event: Event) => {
     if (stay) event.preventDefault()
   }
@@ -47,6 +49,10 @@ export function Dialog({
           // Radix ties the description by itself; told so where there is none.
           {...(!description && { 'aria-describedby': undefined })}
           onOpenAutoFocus={focusFirst}
+          onCloseAutoFocus={(event) => {
+            event.preventDefault()
+            giveBack()
+          }}
           onEscapeKeyDown={hold}
           onInteractOutside={hold}
           className="fixed top-[min(18vh,10rem)] left-1/2 z-50 flex max-h-[calc(100dvh-2*min(9vh,5rem))] w-[min(30rem,calc(100vw-2rem))] -translate-x-1/2 flex-col rounded-lg border border-line bg-card shadow-float focus:outline-none max-sm:top-4 max-sm:max-h-[calc(100dvh-2rem)]"

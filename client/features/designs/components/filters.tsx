@@ -40,7 +40,10 @@ export function Filters({ params, change }: FiltersProps) {
   const [text, setText] = useSearchText({ params, change })
   const projects = useQuery(projectQueries.list())
   return (
-    <search className="grid grid-cols-2 gap-3 border-b border-line p-4 sm:grid-cols-[minmax(12rem,24rem)_minmax(10rem,16rem)_10rem]">
+    <div
+      role="search"
+      className="grid grid-cols-2 gap-3 border-b border-line p-4 sm:grid-cols-[minmax(12rem,24rem)_minmax(10rem,16rem)_10rem]"
+    >
       <Field label="Search" className="max-sm:col-span-2">
         <TextInput
           type="search"
@@ -72,6 +75,6 @@ export function Filters({ params, change }: FiltersProps) {
           <option value="true">Archived</option>
         </Select>
       </Field>
-    </search>
+    </div>
   )
 }

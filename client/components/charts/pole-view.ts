@@ -31,7 +31,7 @@ export function poleView(poles: readonly Complex[]): PoleView {
     shown,
     far: poles.filter(isFar),
     real:
-      room *
+      realRoom *
       Math.max(
         largest((pole) => pole.re),
         0.005 * slowest,

@@ -20,6 +20,8 @@ export interface ComputeOptions {
   maxQueue?: number
   /** ms. */
   timeLimit?: number
+  /** ms. */
+  closeTimeout?: number
   worker?: WorkerFile
 }
 
@@ -56,10 +58,11 @@ export function createCompute(options: ComputeOptions = {}): Compute {
       execArgv,
       minThreads: threads,
       maxThreads: threads,
-      closeTimeout,
+      closeTimeout: options.closeTimeout ?? closeTimeout,
     })
     // A thread that cannot even start leaves piscina without threads for good: the next question starts a new pool.
-    started.on('error', () => {
+    started.on('error', (error: Error) => {
+      process.emitWarning(error)
       if (pool === started) pool = null
       void started.destroy()
     })

@@ -73,6 +73,13 @@ describe('compute.run', () => {
     await expect(compute.run(asked('answer'))).resolves.toEqual(answered)
   })
 
+  it('does not let a computation that never ends keep the pool from closing', async () => {
+    compute = createCompute({ threads: 1, closeTimeout: 300, worker: oddWorker })
+    const hanging = compute.run(asked('hang'))
+    const [outcome] = await Promise.allSettled([hanging, compute.close()])
+    expect(outcome).toMatchObject({ status: 'rejected', reason: expect.any(ComputeError) })
+  })
+
   it('refuses after the pool was closed', async () => {
     compute = createCompute({ threads: 1, worker: oddWorker })
     await compute.run(asked('answer'))

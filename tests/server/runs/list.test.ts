@@ -29,7 +29,7 @@ beforeAll(async () => {
       note: number === 77 ? 'Rail of 50_% and more' : '',
     })
   }
-})
+}, 60_000)
 afterAll(() => server.close())
 
 async function list(query: string): Promise<Page<RunSummary>> {

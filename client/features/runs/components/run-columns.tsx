@@ -99,13 +99,19 @@ export function RunListCard({ run, ...picking }: Picking & { run: RunSummary }) 
           {run.design.name} · {run.author.name} · <Saved run={run} />
         </p>
         <p className="flex flex-wrap gap-x-4 text-sm">
-          <Figure run={run} name="frequency" />
-          <span>
-            <Figure run={run} name="level" /> peak
-          </span>
-          <span>
-            THD <Figure run={run} name="thd" />
-          </span>
+          {run.figures.frequency === null ? (
+            'No settled figures'
+          ) : (
+            <>
+              <Figure run={run} name="frequency" />
+              <span>
+                <Figure run={run} name="level" /> peak
+              </span>
+              <span>
+                THD <Figure run={run} name="thd" />
+              </span>
+            </>
+          )}
         </p>
       </div>
     </article>

@@ -13,7 +13,7 @@ export interface SectionProps {
 export function Section({ title, note, actions, children }: SectionProps) {
   const id = useId()
   return (
-    <section aria-labelledby={id}>
+    <section aria-labelledby={id} className="min-w-0">
       <Card className="overflow-hidden">
         <div className="flex flex-wrap items-center gap-x-4 gap-y-1 px-4 pt-3 pb-2">
           <h2 id={id} className="text-base font-medium">

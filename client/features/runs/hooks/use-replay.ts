@@ -38,10 +38,11 @@ export function useReplay(run: Run, columns: readonly Float64Array[]): Replay {
   const underWay = useRef<AbortController | null>(null)
   useEffect(() => () => underWay.current?.abort(), [])
 
+  /** Progress travels apart from the answer and may come after it; then it says nothing. */
+  const onProgress = (done: number) =>
+    setState((current) => (current.kind === 'computing' ? { kind: 'computing', done } : current))
+
   async function compute(signal: AbortSignal): Promise<ReplayState> {
-    const onProgress = (done: number) => {
-      if (!signal.aborted) setState({ kind: 'computing', done })
-    }
     const answer = await engine.run(replayInputs(run), { signal, onProgress })
     if (isFailure(answer)) return { kind: 'failed', sentence: answer.sentence }
     const { simulation, engineVersion } = answer

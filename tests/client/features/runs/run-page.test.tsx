@@ -1,4 +1,4 @@
-import { screen, within } from '@testing-library/react'
+import { act, screen, within } from '@testing-library/react'
 import userEvent from '@testing-library/user-event'
 import { afterEach, describe, expect, it, vi } from 'vitest'
 import type { EngineClient, RecordResult } from '#client/lib/engine-context.ts'
@@ -113,6 +113,21 @@ describe('replay on the run page', () => {
     expect(screen.getByText(/Stored by engine 1.0.0, replayed by engine 1.1.0/)).toBeVisible()
     const table = screen.getByRole('table', { name: 'Figures of this run' })
     expect(within(table).getAllByText('✓ passes')).toHaveLength(20)
+  })
+
+  it('keeps the outcome when news of progress comes late', async () => {
+    const engine = engineOf(columns[0]!)
+    let report: ((done: number) => void) | undefined
+    await replay({
+      ...engine,
+      run: (inputs, options) => {
+        report = options?.onProgress
+        return engine.run(inputs, options)
+      },
+    })
+    await screen.findByText('It replays.')
+    act(() => report?.(1))
+    expect(screen.getByText('It replays.')).toBeVisible()
   })
 
   it('fails another one and says where', async () => {

@@ -1,6 +1,7 @@
 /** /designs/:designId and the pages under it. */
 import { useQuery } from '@tanstack/react-query'
-import { Outlet, useParams } from 'react-router-dom'
+import { ErrorBoundary } from 'react-error-boundary'
+import { Outlet, useLocation, useParams } from 'react-router-dom'
 import { EngineProvider } from '#client/app/engine-provider.tsx'
 import { EmptyState } from '#client/components/ui/empty-state.tsx'
 import { ErrorState } from '#client/components/ui/error-state.tsx'
@@ -19,7 +20,9 @@ const pages = [
   { to: 'tone', name: 'Tone', question: 'What comes out?' },
 ]
 
+/** A page that fails leaves the circuit, its figures and what was typed alone. */
 function OpenSheet({ design }: { design: Design }) {
+  const { pathname } = useLocation()
   const state = useSheet(design)
   const { content } = state.sheet
   const { circuit, stimulus, timing } = content
@@ -31,7 +34,14 @@ function OpenSheet({ design }: { design: Design }) {
         <SaveRunDialog design={design} inputs={{ circuit, stimulus, timing }} disabled={state.invalid} />
       }
     >
-      <Outlet context={state.sheet} />
+      <ErrorBoundary
+        resetKeys={[pathname]}
+        fallbackRender={({ error, resetErrorBoundary }) => (
+          <ErrorState error={error} retry={resetErrorBoundary} />
+        )}
+      >
+        <Outlet context={state.sheet} />
+      </ErrorBoundary>
     </DesignSheet>
   )
 }

@@ -51,20 +51,20 @@ const at = { shuntR: 88, series: 108, shuntC: 128, amplifier: 174, gain: 238 }
 const row = { output: 60, input: 252, earth: 392 }
 
 /** Slots as distances from the drawing's middle, px: left ones grow to the left, right ones to the right. */
-const outer = 'absolute w-[calc(50%-91px)] max-w-28'
+const outer = 'absolute w-[calc(50%-95px)] max-w-21'
 const places: Record<CircuitSlot, string> = {
-  seriesR: `${outer} right-[calc(50%+73px)] max-w-[5.8rem] top-[74px] text-right`,
-  seriesC: `${outer} right-[calc(50%+77px)] max-w-[5.5rem] top-[156px] text-right`,
+  seriesR: `${outer} right-[calc(50%+71px)] top-[74px] text-right`,
+  seriesC: `${outer} right-[calc(50%+77px)] top-[156px] text-right`,
   shuntR: `${outer} right-[calc(50%+91px)] top-[288px] text-right`,
-  shuntC: 'absolute left-[calc(50%-16px)] w-[74px] top-[288px]',
-  feedbackR: `${outer} left-[calc(50%+91px)] top-[118px]`,
-  feedbackShuntedR: `${outer} left-[calc(50%+91px)] top-[166px]`,
-  groundR: `${outer} left-[calc(50%+91px)] top-[288px]`,
-  load: `${outer} left-[calc(50%+91px)] top-[4px]`,
+  shuntC: 'absolute left-[calc(50%-16px)] w-[66px] top-[288px]',
+  feedbackR: `${outer} left-[calc(50%+93px)] top-[118px]`,
+  feedbackShuntedR: `${outer} left-[calc(50%+93px)] top-[166px]`,
+  groundR: `${outer} left-[calc(50%+93px)] top-[288px]`,
+  load: `${outer} left-[calc(50%+93px)] top-[4px]`,
 }
 
 /** With diodes the feedback's series part moves up to make room for the part that they bridge. */
-const feedbackAboveDiodes = `${outer} left-[calc(50%+91px)] top-[74px]`
+const feedbackAboveDiodes = `${outer} left-[calc(50%+93px)] top-[74px]`
 
 function description(control: CircuitDrawingProps['control'], loaded: boolean): string {
   const gainArm = {

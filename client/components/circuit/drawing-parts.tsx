@@ -4,7 +4,7 @@ import type { ReactNode } from 'react'
 /** Half-sizes in pixels. */
 const resistor = { across: 9, along: 23 }
 const plate = { half: 15, gap: 9 }
-const lampRadius = 17
+const lampRadius = 14
 
 interface At {
   x: number

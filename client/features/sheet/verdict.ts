@@ -2,7 +2,7 @@
 import { criticalFeedback } from '#client/features/sheet/trim.ts'
 import type { Figures } from '#shared/figures.ts'
 import type { Circuit } from '#shared/schemas/circuit.ts'
-import { formatPercent, formatQuantity } from '#shared/units/format.ts'
+import { formatNumber, formatPercent, formatQuantity } from '#shared/units/format.ts'
 import type { SmallSignal } from '#sim/types.ts'
 
 export interface Phrase {
@@ -45,6 +45,14 @@ export function growthPerCycle({ growthRate, frequency }: SmallSignal): number {
   return Math.expm1(growthRate / frequency)
 }
 
+/** "grows 6.4 % a cycle", or by its factor where the growth is no longer small. */
+function growth(linear: SmallSignal): string {
+  const ratio = growthPerCycle(linear)
+  return ratio < 1
+    ? `grows ${percent(ratio)} a cycle`
+    : `grows ${formatNumber(1 + ratio, { digits: 2 })}-fold a cycle`
+}
+
 function whenItStarts(linear: SmallSignal, circuit: Circuit, record: RecordFacts | null): Phrase[] {
   const lead: Phrase = { text: 'It starts.', mark: 'good' }
   const excess = ` The loop exceeds its critical gain by ${percent(linear.gainMargin)}`
@@ -55,7 +63,7 @@ function whenItStarts(linear: SmallSignal, circuit: Circuit, record: RecordFacts
         text: `${excess}, so far that it does not ring: the output leaves for a rail without oscillating. Lower feedback R.`,
       },
     ]
-  const grows = `${excess}, grows ${percent(growthPerCycle(linear))} a cycle`
+  const grows = `${excess}, ${growth(linear)}`
   const figures = record?.figures
   if (!record || !figures) return [lead, { text: `${grows}.` }]
   if (figures.timeTo90 === null)

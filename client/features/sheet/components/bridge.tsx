@@ -33,10 +33,11 @@ function LoadSlot() {
       {!readOnly && (
         <Button
           variant="quiet"
-          className="px-1.5! text-sm"
+          aria-label="Remove load"
+          className="absolute -top-2.5 right-0 size-8 px-0! text-soft!"
           onClick={() => edit((before) => withLoad(before, null))}
         >
-          Remove
+          ×
         </Button>
       )}
     </>

@@ -5,7 +5,14 @@
  */
 import { useEffect, useRef, useState, type MouseEvent, type PointerEvent, type RefObject } from 'react'
 import type { Cursors, View } from '#client/components/charts/chart-types.ts'
-import { fractionOf, leastSpan, panView, timeAt, zoomView } from '#client/components/charts/view-range.ts'
+import {
+  clampView,
+  fractionOf,
+  leastSpan,
+  panView,
+  timeAt,
+  zoomView,
+} from '#client/components/charts/view-range.ts'
 import {
   placedCursor,
   withCursor,
@@ -84,10 +91,13 @@ export function useWaveformPointer(
     }
   }
 
-  function onPointerUp() {
-    if (drag.current?.kind === 'select' && selection) {
-      const [from, to] = [timeAt(selection[0], state.view), timeAt(selection[1], state.view)]
-      change({ view: zoomView([from, to], 1, (from + to) / 2, state.whole, leastSpan(state.sampleInterval)) })
+  /** Reads the event, not `selection`: the latest move may not have been rendered yet. */
+  function onPointerUp(event: PointerEvent) {
+    const current = drag.current
+    if (current?.kind === 'select' && current.moved) {
+      const ends = [fraction(current.startX), fraction(event.clientX)]
+      const [from, to] = [timeAt(Math.min(...ends), state.view), timeAt(Math.max(...ends), state.view)]
+      change({ view: clampView([from, to], state.whole, leastSpan(state.sampleInterval)) })
     }
     cancel()
   }
@@ -110,29 +120,38 @@ export function useWaveformPointer(
     change({ view: state.whole, cursors: beforeClick.current })
   }
 
-  function wheel(event: WheelEvent) {
-    const { view, whole, sampleInterval } = state
-    if (Math.abs(event.deltaX) > Math.abs(event.deltaY)) {
-      event.preventDefault()
-      change({ view: panView(view, (event.deltaX / width()) * (view[1] - view[0]), whole) })
-      return
-    }
-    const factor = Math.exp(event.deltaY * wheelZoom)
-    const about = timeAt(fraction(event.clientX), view)
-    const next = zoomView(view, factor, about, whole, leastSpan(sampleInterval))
-    if (next[0] === view[0] && next[1] === view[1]) return
+  function wheel(event: WheelEvent, view: View): View | null {
+    const { whole, sampleInterval } = state
+    const span = view[1] - view[0]
+    const sideways = Math.abs(event.deltaX) > Math.abs(event.deltaY)
+    const next = sideways
+      ? panView(view, (event.deltaX / width()) * span, whole)
+      : zoomView(
+          view,
+          Math.exp(event.deltaY * wheelZoom),
+          timeAt(fraction(event.clientX), view),
+          whole,
+          leastSpan(sampleInterval),
+        )
+    if (next[0] === view[0] && next[1] === view[1]) return null
     event.preventDefault()
     change({ view: next })
+    return next
   }
 
-  // React listens to the wheel passively: a zoom must keep the page from scrolling.
+  // Several turns of the wheel may come between two renders: each goes on from the one before.
+  const wheelFrom = useRef(state.view)
   const latestWheel = useRef(wheel)
   useEffect(() => {
     latestWheel.current = wheel
+    wheelFrom.current = state.view
   })
+  // React listens to the wheel passively: a zoom must keep the page from scrolling.
   useEffect(() => {
     const element = area.current
-    const listener = (event: WheelEvent) => latestWheel.current(event)
+    const listener = (event: WheelEvent) => {
+      wheelFrom.current = latestWheel.current(event, wheelFrom.current) ?? wheelFrom.current
+    }
     element?.addEventListener('wheel', listener, { passive: false })
     return () => element?.removeEventListener('wheel', listener)
   }, [area])

@@ -32,7 +32,7 @@ function StartUpRecord({ control, smallSignal, simulation }: StartUpRecordProps)
   const { view, setView, cursors, setCursors } = useLiveView(end, sampleInterval)
   const spans = useMemo(() => limitSpans(simulation.modes), [simulation.modes])
   const shares = useMemo(() => modeShares(simulation), [simulation])
-  const near = closeUp(figures, end)
+  const near = useMemo(() => closeUp(figures, end), [figures, end])
   return (
     <div className="space-y-4">
       <OutputPlot

@@ -51,7 +51,7 @@ const at = { shuntR: 88, series: 108, shuntC: 128, amplifier: 174, gain: 238 }
 const row = { output: 60, input: 252, earth: 392 }
 
 /** Slots as distances from the drawing's middle, px: left ones grow to the left, right ones to the right. */
-const outer = 'absolute w-[calc(50%-95px)] max-w-21'
+const outer = 'absolute w-[calc((50%-93px)*0.9+4px)] max-w-21'
 const places: Record<CircuitSlot, string> = {
   seriesR: `${outer} right-[calc(50%+71px)] top-[74px] text-right`,
   seriesC: `${outer} right-[calc(50%+77px)] top-[156px] text-right`,

@@ -68,7 +68,7 @@ export function Bridge() {
           ),
         feedbackShuntedR:
           kind === 'diodes' ? (
-            <DrawnField name="feedbackShuntedR" label="across diodes" side="right" />
+            <DrawnField name="feedbackShuntedR" label="R ∥ diodes" side="right" />
           ) : undefined,
         groundR: (
           <DrawnField name="groundR" label={kind === 'lamp' ? 'cold lamp' : 'ground R'} side="right" />

@@ -1,7 +1,8 @@
 /**
  * The one way to the server: JSON in and out, problems (RFC 9457) as `ApiError`, silence as `OfflineError`.
- * Keeps the CSRF token and says aloud when the session has ended or the server came or went.
+ * Keeps the session's CSRF token and says aloud when the session has ended or the server came or went.
  */
+import type { Session } from '#shared/schemas/account.ts'
 import { problemSchema, type Problem } from '#shared/schemas/problem.ts'
 import { reportReachable } from '#client/lib/reachability.ts'
 
@@ -37,11 +38,11 @@ export interface RequestOptions {
 }
 
 const base = '/api'
-let csrfToken: string | null = null
+let current: { csrfToken: string; personId: number } | null = null
 
-/** Keeps the token of the current session for every request that changes something; null forgets it. */
-export function setCsrfToken(token: string | null): void {
-  csrfToken = token
+/** Keeps whose session this page works in, and its token for requests that change something; null forgets it. */
+export function keepSession(session: Session | null): void {
+  current = session && { csrfToken: session.csrfToken, personId: session.person.id }
 }
 
 type Listener = () => void
@@ -76,10 +77,10 @@ async function toError(response: Response): Promise<ApiError> {
   })
 }
 
-async function request(method: string, path: string, body: unknown, options: RequestOptions) {
+async function send(method: string, path: string, body: unknown, options: RequestOptions): Promise<Response> {
   const headers: Record<string, string> = { Accept: 'application/json, application/problem+json' }
   if (body !== undefined) headers['Content-Type'] = 'application/json'
-  if (method !== 'GET' && csrfToken) headers['X-CSRF-Token'] = csrfToken
+  if (method !== 'GET' && current) headers['X-CSRF-Token'] = current.csrfToken
   let response: Response
   try {
     response = await fetch(apiUrl(path, options.query), {
@@ -101,9 +102,33 @@ async function request(method: string, path: string, body: unknown, options: Req
   }
   reportReachable(true)
   if (response.ok) return response
-  const error = await toError(response)
-  if (error.problem.code === 'signed-out') for (const listener of signedOutListeners) listener()
-  throw error
+  throw await toError(response)
+}
+
+/**
+ * Another tab has signed in anew, so the cookie belongs to a session whose token this page does not know. Takes the
+ * token if it is the same person's.
+ * @throws ApiError `signed-out` when somebody else has signed in: this page must not act in another's name
+ */
+async function adoptNewSession(before: { personId: number }): Promise<void> {
+  const session = (await (await send('GET', '/session', undefined, {})).json()) as Session
+  if (session.person.id === before.personId) return keepSession(session)
+  const title = `${session.person.name} has signed in in another tab. Sign in again to go on.`
+  throw new ApiError({ type: 'about:blank', title, status: 401, code: 'signed-out' })
+}
+
+async function request(method: string, path: string, body: unknown, options: RequestOptions) {
+  try {
+    return await send(method, path, body, options).catch(async (error: unknown) => {
+      if (!(error instanceof ApiError) || error.problem.code !== 'csrf' || !current) throw error
+      await adoptNewSession(current)
+      return send(method, path, body, options)
+    })
+  } catch (error) {
+    if (error instanceof ApiError && error.problem.code === 'signed-out')
+      for (const listener of signedOutListeners) listener()
+    throw error
+  }
 }
 
 /** A connection that breaks within the body is silence too. */

@@ -10,11 +10,11 @@ export function parseListParams<Schema extends ListSchema>(
   schema: Schema,
   search: URLSearchParams,
 ): z.output<Schema> {
-  const stated = Object.fromEntries([...search].filter(([key, value]) => key in schema.shape && value !== ''))
-  const first = schema.safeParse(stated)
+  const stated = [...search].filter(([key, value]) => key in schema.shape && value !== '')
+  const first = schema.safeParse(Object.fromEntries(stated))
   if (first.success) return first.data
-  for (const issue of first.error.issues) delete stated[String(issue.path[0])]
-  return schema.parse(stated)
+  const wrong = new Set(first.error.issues.map((issue) => issue.path[0]))
+  return schema.parse(Object.fromEntries(stated.filter(([key]) => !wrong.has(key))))
 }
 
 /** The address of changed parameters; defaults are left out of it. */

@@ -1,6 +1,6 @@
 /** Who is signed in, as every feature may ask it. Signing in and out itself is features/session. */
 import { queryOptions, useSuspenseQuery } from '@tanstack/react-query'
-import { api, setCsrfToken } from '#client/lib/api.ts'
+import { api, keepSession } from '#client/lib/api.ts'
 import { roleIncludes, type Role } from '#shared/roles.ts'
 import type { Session } from '#shared/schemas/account.ts'
 
@@ -11,7 +11,7 @@ export const sessionQueries = {
       queryKey: ['session'],
       queryFn: async ({ signal }) => {
         const session = await api.get<Session>('/session', { signal })
-        setCsrfToken(session.csrfToken)
+        keepSession(session)
         return session
       },
       staleTime: Infinity,

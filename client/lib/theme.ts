@@ -22,10 +22,19 @@ function stored(): ThemeChoice {
 
 let choice: ThemeChoice = 'auto'
 
+/** The colour of the browser's own bars: index.html has one for either theme, chosen by `media`. */
+function applyToBrowser(): void {
+  for (const meta of document.querySelectorAll<HTMLMetaElement>('meta[name=theme-color]')) {
+    const of = meta.dataset.of ?? ''
+    meta.media = choice === 'auto' ? `(prefers-color-scheme: ${of})` : choice === of ? 'all' : 'not all'
+  }
+}
+
 function apply(): void {
   const root = document.documentElement
   if (choice === 'auto') delete root.dataset.theme
   else root.dataset.theme = choice
+  applyToBrowser()
   for (const listener of listeners) listener()
 }
 

@@ -1,4 +1,4 @@
-/** Mounts the whole client at an address, against a fake server, as `main.tsx` does in a browser. */
+/** Mounts the whole client at an address, against a fake server, as `app/start.tsx` does in a browser. */
 import { configure, render } from '@testing-library/react'
 import userEvent from '@testing-library/user-event'
 import { vi } from 'vitest'

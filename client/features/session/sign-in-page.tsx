@@ -5,7 +5,7 @@ import { Card } from '#client/components/ui/card.tsx'
 import { PageTitle } from '#client/components/ui/page-title.tsx'
 import { WaveMark } from '#client/components/wave-mark.tsx'
 import { SignInForm } from '#client/features/session/components/sign-in-form.tsx'
-import { setCsrfToken } from '#client/lib/api.ts'
+import { keepSession } from '#client/lib/api.ts'
 import { safeNext } from '#client/lib/next-path.ts'
 
 /** The door. Nothing of whoever was here before stays in memory; after it comes the page that was asked for. */
@@ -14,7 +14,7 @@ export function SignInPage() {
   const navigate = useNavigate()
   const queryClient = useQueryClient()
   useEffect(() => {
-    setCsrfToken(null)
+    keepSession(null)
     queryClient.clear()
   }, [queryClient])
   return (

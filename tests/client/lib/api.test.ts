@@ -1,7 +1,8 @@
 /** The contract with the server: /api, X-CSRF-Token, problem+json (RFC 9457), silence. */
 import { afterEach, beforeEach, describe, expect, it, vi } from 'vitest'
-import { api, ApiError, apiUrl, OfflineError, onSignedOut, setCsrfToken } from '#client/lib/api.ts'
+import { api, ApiError, apiUrl, OfflineError, onSignedOut, keepSession } from '#client/lib/api.ts'
 import { isReachable, reportReachable } from '#client/lib/reachability.ts'
+import { aSession } from '#tests/support/client-data.ts'
 import { answer, fakeApi, problem } from '#tests/support/fake-api.ts'
 
 const failure = (promise: Promise<unknown>): Promise<unknown> =>
@@ -12,7 +13,7 @@ const failure = (promise: Promise<unknown>): Promise<unknown> =>
 
 beforeEach(() => reportReachable(true))
 afterEach(() => {
-  setCsrfToken(null)
+  keepSession(null)
   vi.unstubAllGlobals()
 })
 
@@ -30,7 +31,7 @@ describe('requests', () => {
       'POST /api/projects': answer({ id: 1 }, 201),
       'DELETE /api/runs/4': answer(null, 204),
     })
-    setCsrfToken('abc')
+    keepSession(aSession('engineer', { csrfToken: 'abc' }))
     await api.get('/projects')
     await expect(api.post('/projects', { name: 'Line set' })).resolves.toEqual({ id: 1 })
     await expect(api.delete('/runs/4')).resolves.toBeUndefined()
@@ -94,6 +95,45 @@ describe('refusals', () => {
     stop()
     await failure(api.get('/designs'))
     expect(heard).toHaveBeenCalledTimes(1)
+  })
+})
+
+describe('a second tab that signed in anew', () => {
+  /** Knows only the token of the new session. */
+  const serverOf = (session: ReturnType<typeof aSession>) =>
+    fakeApi({
+      'GET /api/session': answer(session),
+      'POST /api/projects': ({ headers }) =>
+        headers.get('X-CSRF-Token') === session.csrfToken ? answer({ id: 1 }, 201) : problem(403, 'csrf'),
+    })
+
+  it('goes unnoticed when it is the same person', async () => {
+    keepSession(aSession())
+    const server = serverOf(aSession('engineer', { csrfToken: 'token-2' }))
+    await expect(api.post('/projects', { name: 'Line set' })).resolves.toEqual({ id: 1 })
+    await api.post('/projects', { name: 'Probe set' })
+    expect(server.asked('GET /api/session')).toHaveLength(1)
+  })
+
+  it('ends the session of this page when it is somebody else', async () => {
+    keepSession(aSession())
+    const other = {
+      id: 2,
+      name: 'Ruben Achterberg',
+      email: 'ruben@brackwater.example',
+      role: 'admin',
+    } as const
+    const server = serverOf(aSession('admin', { csrfToken: 'token-2', person: other }))
+    const heard = vi.fn()
+    const stop = onSignedOut(heard)
+    const error = await failure(api.post('/projects', { name: 'Line set' }))
+    expect(error).toMatchObject({
+      message: expect.stringMatching(/^Ruben Achterberg has signed in/) as string,
+      problem: { code: 'signed-out' },
+    })
+    expect(heard).toHaveBeenCalledTimes(1)
+    expect(server.asked('POST /api/projects')).toHaveLength(1)
+    stop()
   })
 })
 

@@ -44,6 +44,18 @@ describe('theme', () => {
     expect(root).toHaveAttribute('data-theme', 'light')
   })
 
+  it("colours the browser's own bars alike", async () => {
+    document.head.innerHTML = ['light', 'dark']
+      .map((of) => `<meta name="theme-color" data-of="${of}">`)
+      .join('')
+    const media = () => [...document.head.querySelectorAll('meta')].map((meta) => meta.media)
+    const { chooseTheme } = await themeUnder(false)
+    chooseTheme('dark')
+    expect(media()).toEqual(['not all', 'all'])
+    chooseTheme('auto')
+    expect(media()).toEqual(['(prefers-color-scheme: light)', '(prefers-color-scheme: dark)'])
+  })
+
   it('forgets the choice with "auto"', async () => {
     const { chooseTheme } = await themeUnder(false)
     chooseTheme('dark')

@@ -1,5 +1,5 @@
 import { useMutation, useQueryClient } from '@tanstack/react-query'
-import { api, setCsrfToken } from '#client/lib/api.ts'
+import { api, keepSession } from '#client/lib/api.ts'
 import { sessionQueries } from '#client/lib/session.ts'
 import type { Session, SignIn } from '#shared/schemas/account.ts'
 
@@ -9,7 +9,7 @@ export function useSignIn() {
   return useMutation({
     mutationFn: (body: SignIn) => api.post<Session>('/session', body),
     onSuccess: (session) => {
-      setCsrfToken(session.csrfToken)
+      keepSession(session)
       queryClient.setQueryData(sessionQueries.current().queryKey, session)
     },
   })

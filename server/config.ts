@@ -1,8 +1,9 @@
 import { randomBytes } from 'node:crypto'
-import { chmodSync, existsSync, mkdirSync, readFileSync, writeFileSync } from 'node:fs'
+import { chmodSync, existsSync, readFileSync, writeFileSync } from 'node:fs'
 import { dirname, join, resolve } from 'node:path'
 import { z } from 'zod'
 import { isLoopbackName } from '#server/http/loopback.ts'
+import { makeFolder } from '#server/make-folder.ts'
 import { projectRoot } from '#server/root.ts'
 import { StartError } from '#server/start-error.ts'
 
@@ -93,7 +94,7 @@ function demoSecret(databaseFile: string): string {
       if (kept.length >= secretLength) return kept
     }
     const secret = randomBytes(32).toString('hex')
-    mkdirSync(dirname(file), { recursive: true })
+    makeFolder(dirname(file))
     writeFileSync(file, `${secret}\n`, { mode: 0o600 })
     chmodSync(file, 0o600)
     return secret

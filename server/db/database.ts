@@ -1,10 +1,12 @@
-import { accessSync, constants, existsSync, mkdirSync } from 'node:fs'
+import { accessSync, constants, existsSync } from 'node:fs'
 import { dirname } from 'node:path'
 import { Sequelize, Transaction } from 'sequelize'
 import { driver } from '#server/db/driver.ts'
 import { createMigrator } from '#server/db/migrator.ts'
+import { migrations } from '#server/db/migrations/index.ts'
 import { defineModels, type Models } from '#server/db/models/index.ts'
 import { WriteQueue } from '#server/db/write-queue.ts'
+import { makeFolder } from '#server/make-folder.ts'
 import { StartError } from '#server/start-error.ts'
 
 /** The open database: models to read through, and one queue for everything that changes it. */
@@ -27,12 +29,11 @@ export class Database {
 
   /** Applies every migration that is still missing. */
   async migrate(): Promise<void> {
-    const migrator = createMigrator(this.sequelize)
-    const known = new Set((await migrator.migrations({})).map((migration) => migration.name))
-    const newer = (await migrator.executed()).find((migration) => !known.has(migration.name))
-    if (newer)
+    const { migrator, applied } = createMigrator(this.sequelize)
+    const newer = (await applied()).find((name) => !migrations.some((known) => known.name === name))
+    if (newer !== undefined)
       throw new StartError(
-        `The database was written by a newer version (migration ${newer.name}): start that version, or choose another DATABASE_FILE.`,
+        `The database was written by a newer version (migration ${newer}): start that version, or choose another DATABASE_FILE.`,
       )
     await migrator.up()
   }
@@ -68,14 +69,15 @@ export async function openDatabase(file: string): Promise<Database> {
     await database.migrate()
     return database
   } catch (error) {
-    await sequelize.close().catch(() => undefined)
+    // Not awaited: a file that could not be opened never answers to being closed.
+    void sequelize.close().catch(() => undefined)
     throw asStartError(error, file)
   }
 }
 
 function assertWritable(file: string): void {
   try {
-    mkdirSync(dirname(file), { recursive: true })
+    makeFolder(dirname(file))
     accessSync(existsSync(file) ? file : dirname(file), constants.W_OK)
   } catch (error) {
     throw unwritable(file, (error as NodeJS.ErrnoException).code)

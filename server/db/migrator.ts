@@ -8,13 +8,19 @@ export function createMigrator(sequelize: Sequelize) {
     sequelize.transaction(async (transaction) => {
       for (const statement of statements) await sequelize.query(statement, { transaction })
     })
-  return new Umzug({
+  const storage = new SequelizeStorage({ sequelize, modelName: 'migration', tableName: 'migrations' })
+  const migrator = new Umzug({
     migrations: migrations.map(({ name, up, down }) => ({
       name,
       up: () => run(up),
       down: () => run(down),
     })),
-    storage: new SequelizeStorage({ sequelize, modelName: 'migration', tableName: 'migrations' }),
+    storage,
     logger: undefined,
   })
+  return {
+    migrator,
+    /** Names of all that were applied to this database, by whatever version. */
+    applied: () => storage.executed(),
+  }
 }

@@ -15,9 +15,9 @@ const elements = [
   { type: 'client-components', pattern: 'client/components' },
   { type: 'client-lib', pattern: 'client/lib' },
   { type: 'client-app', pattern: 'client/app' },
-  { type: 'client-main', pattern: 'client/main.tsx', partialMatch: false },
+  { type: 'client-main', pattern: 'client' },
   { type: 'tests', pattern: 'tests' },
-]
+].map((element) => ({ ...element, partialMatch: false }))
 
 const to = (...types) => types.map((type) => ({ to: { element: { type } } }))
 
@@ -50,7 +50,7 @@ const policies = [
     from: { element: { type: 'client-app' } },
     allow: to('client-app', 'client-feature', 'client-components', 'client-lib', 'client-workers', 'shared'),
   },
-  { from: { element: { type: 'client-main' } }, allow: to('client-app') },
+  { from: { element: { type: 'client-main' } }, allow: to('client-app', 'client-lib') },
   {
     // Types of the engine's results may be named anywhere in the client; its code may not be loaded there.
     from: { element: { type: ['client-lib', 'client-components', 'client-feature', 'client-app'] } },
@@ -76,6 +76,7 @@ export default tseslint.config(
       '@typescript-eslint/switch-exhaustiveness-check': 'error',
       '@typescript-eslint/no-non-null-assertion': 'off',
       '@typescript-eslint/no-invalid-void-type': 'off',
+      '@typescript-eslint/no-empty-function': ['error', { allow: ['arrowFunctions', 'methods'] }],
       '@typescript-eslint/no-unused-vars': ['error', { argsIgnorePattern: '^_', ignoreRestSiblings: true }],
       'max-lines': ['error', { max: 400 }],
       'no-console': ['error', { allow: ['error'] }],
@@ -88,6 +89,7 @@ export default tseslint.config(
     settings: {
       'boundaries/elements': elements,
       'boundaries/include': ['{client,server,sim,shared,tests}/**/*'],
+      'boundaries/dependency-nodes': ['import', 'dynamic-import', 'export'],
       'import/resolver': { typescript: { alwaysTryTypes: true, project: 'tsconfig.json' } },
     },
     rules: {

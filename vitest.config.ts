@@ -16,6 +16,7 @@ export default defineConfig({
             'tests/client/**/*.node.test.ts',
           ],
           testTimeout: 30_000,
+          hookTimeout: 60_000,
         },
       },
       {

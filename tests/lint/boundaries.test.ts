@@ -30,7 +30,7 @@ const forbidden: [string, string, string][] = [
   [
     'client feature to feature',
     'client/features/tone/index.ts',
-    `export { RunPage } from '#client/features/runs/index.ts'\n`,
+    `export * from '#client/features/start-up/index.ts'\n`,
   ],
   [
     'client to server',

@@ -1,6 +1,7 @@
 /** Debian's Chromium through playwright-core, quiet on a machine without network. */
 import { createRequire } from 'node:module'
 import { readFileSync } from 'node:fs'
+import type axeCore from 'axe-core'
 import { chromium, type Browser, type Page } from 'playwright-core'
 import { demoAccounts } from '#server/db/demo/accounts.ts'
 import type { Role } from '#shared/roles.ts'
@@ -62,7 +63,7 @@ const axeSource = readFileSync(createRequire(import.meta.url).resolve('axe-core/
 export async function accessibilityFindings(page: Page): Promise<string[]> {
   await page.evaluate(axeSource)
   return page.evaluate(async () => {
-    const { axe } = window as unknown as { axe: typeof import('axe-core') }
+    const { axe } = window as unknown as { axe: typeof axeCore }
     const { violations } = await axe.run(document, {
       runOnly: ['wcag2a', 'wcag2aa', 'wcag21a', 'wcag21aa', 'wcag22aa', 'best-practice'],
     })

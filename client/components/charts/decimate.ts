@@ -17,6 +17,14 @@ export function gridRange(length: number, sampleInterval: number, from: number, 
   }
 }
 
+/** Samples of a uniform grid within [from, to] s; one on an edge belongs to it in spite of rounding. */
+export function samplesWithin(length: number, sampleInterval: number, from: number, to: number): IndexRange {
+  return {
+    first: Math.max(0, Math.ceil(from / sampleInterval - 1e-6)),
+    last: Math.min(length - 1, Math.floor(to / sampleInterval + 1e-6)),
+  }
+}
+
 /** Index of the first entry of the ascending `times` that is not before `time`; its length when all are. */
 function firstNotBefore(times: Float64Array, time: number): number {
   let low = 0

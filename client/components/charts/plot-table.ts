@@ -1,7 +1,7 @@
 /** The numbers behind a waveform as a short table: the visible span, evenly thinned where it is long. */
 import type { View, WaveformSeries } from '#client/components/charts/chart-types.ts'
 import { valueAt } from '#client/components/charts/cursor-readings.ts'
-import { gridRange } from '#client/components/charts/decimate.ts'
+import { samplesWithin } from '#client/components/charts/decimate.ts'
 import { formatQuantity } from '#shared/units/format.ts'
 
 export interface PlotTable {
@@ -28,7 +28,7 @@ export function waveformTable(
   view: View,
 ): PlotTable {
   const samples = Math.max(0, ...series.map((one) => one.values.length))
-  const range = gridRange(samples, sampleInterval, ...view)
+  const range = samplesWithin(samples, sampleInterval, ...view)
   const within = range.last - range.first + 1
   const step = Math.max(1, Math.ceil(within / mostRows))
   const rows: string[][] = []

@@ -1,6 +1,7 @@
 /** The visible span of a record as CSV (RFC 4180): every sample, SI units in the header, full double precision. */
 import Papa from 'papaparse'
 import type { View, WaveformSeries } from '#client/components/charts/chart-types.ts'
+import { samplesWithin } from '#client/components/charts/decimate.ts'
 
 /** Rows written between two breaths of the page. */
 const rowsPerPiece = 20_000
@@ -15,9 +16,7 @@ export async function spanCsv(
   view: View,
 ): Promise<string[]> {
   const samples = Math.max(0, ...series.map((one) => one.values.length))
-  // A grid point on the view's edge belongs to it in spite of rounding.
-  const first = Math.max(0, Math.ceil(view[0] / sampleInterval - 1e-6))
-  const last = Math.min(samples - 1, Math.floor(view[1] / sampleInterval + 1e-6))
+  const { first, last } = samplesWithin(samples, sampleInterval, ...view)
   const newline = '\r\n'
   const header = ['time (s)', ...series.map((one) => (one.unit ? `${one.label} (${one.unit})` : one.label))]
   const pieces = [Papa.unparse([header], { newline }) + newline]

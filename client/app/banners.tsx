@@ -9,7 +9,7 @@ const askAgainAfter = 3000
 export function DemoBanner() {
   if (useSession().mode !== 'demo') return null
   return (
-    <p className="gutter border-b border-hair bg-sunk py-1 text-sm text-soft" data-print="hidden">
+    <p className="gutter border-b border-hair bg-sunk py-1 text-sm text-soft">
       Demo: invented data
     </p>
   )

@@ -7,6 +7,7 @@ import { LinkButton } from '#client/components/ui/link-button.tsx'
 import { PageTitle } from '#client/components/ui/page-title.tsx'
 import { Button } from '#client/components/ui/button.tsx'
 import { ApiError, OfflineError } from '#client/lib/api.ts'
+import { reportReachable } from '#client/lib/reachability.ts'
 
 /** A page's own file that cannot be had: the server is away, or has a newer version of the application. */
 function isMissingChunk(error: unknown): boolean {
@@ -34,7 +35,8 @@ export function RouteError() {
   // Failures that the server or the network explains are told on the page; the rest are faults of ours.
   const explained = error instanceof ApiError || error instanceof OfflineError || isRouteErrorResponse(error)
   useEffect(() => {
-    if (!explained) console.error(error)
+    if (isMissingChunk(error)) reportReachable(false)
+    else if (!explained) console.error(error)
   }, [error, explained])
   const retry = () => {
     reset()

@@ -68,8 +68,11 @@ export function draftReducer(state: DraftState, action: DraftAction): DraftState
       return moved(state, history.advance(state.history, { content, refused }, action.step))
     }
     case 'refuse': {
+      // The 4 on the way to a refused 4q7 was read as a value: the circuit goes back to before the typing.
+      const typing = state.history.step === action.field
+      const { content } = (typing && state.history.past.at(-1)) || present
       const refused = { ...present.refused, [action.field]: action.text }
-      return moved(state, history.advance(state.history, { ...present, refused }, action.field))
+      return moved(state, history.advance(state.history, { content, refused }, action.field))
     }
     case 'seal':
       return moved(state, history.seal(state.history))

@@ -8,11 +8,7 @@ const askAgainAfter = 3000
 
 export function DemoBanner() {
   if (useSession().mode !== 'demo') return null
-  return (
-    <p className="gutter border-b border-hair bg-sunk py-1 text-sm text-soft">
-      Demo: invented data
-    </p>
-  )
+  return <p className="gutter border-b border-hair bg-sunk py-1 text-sm text-soft">Demo: invented data</p>
 }
 
 /** While the server is away, asks for its health until it answers; everything typed stays in the page. */

@@ -44,7 +44,8 @@ export function Dialog({
   return (
     <Radix.Root open={open} onOpenChange={onOpenChange}>
       <Radix.Portal>
-        <Radix.Overlay className="fixed inset-0 z-40 bg-veil" />
+        {/* Not radix's own veil: that one locks scrolling with an inline style sheet, which the CSP refuses. */}
+        <div className="fixed inset-0 z-40 bg-veil" />
         <Radix.Content
           // Radix ties the description by itself; told so where there is none.
           {...(!description && { 'aria-describedby': undefined })}

@@ -41,7 +41,8 @@ export const loopbackHostOnly: RequestHandler = (request, _response, next) => {
 
 /** A body under /api is JSON or nothing. */
 export const jsonOnly: RequestHandler = (request, _response, next) => {
-  if (request.is('application/json') === false)
+  const isEmpty = request.get('Content-Length') === '0'
+  if (!isEmpty && request.is('application/json') === false)
     throw new HttpError(415, 'unsupported-type', 'The body must be application/json.')
   next()
 }

@@ -1,5 +1,5 @@
 import { randomUUID } from 'node:crypto'
-import { pino, type Logger } from 'pino'
+import { pino, type DestinationStream, type Logger } from 'pino'
 import { pinoHttp } from 'pino-http'
 import type { Config } from '#server/config.ts'
 
@@ -14,12 +14,10 @@ const secrets = [
   'authorization',
 ]
 
-/** The process's structured log: one JSON object a line on standard output. */
-export function createLog({ logLevel }: Pick<Config, 'logLevel'>): Logger {
-  return pino({
-    level: logLevel,
-    redact: secrets.flatMap((name) => [name, `*.${name}`, `*.*.${name}`]),
-  })
+/** The structured log: one JSON object a line, on standard output unless `destination` says otherwise. */
+export function createLog({ logLevel }: Pick<Config, 'logLevel'>, destination?: DestinationStream): Logger {
+  const redact = secrets.flatMap((name) => [name, `*.${name}`, `*.*.${name}`])
+  return pino({ level: logLevel, redact }, destination ?? pino.destination(1))
 }
 
 /** One line per request: method, path, status, time and who asked. Headers and bodies stay out of the log. */

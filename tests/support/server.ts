@@ -1,8 +1,8 @@
 import { join } from 'node:path'
-import { pino } from 'pino'
 import { createCompute } from '#server/compute/index.ts'
 import type { Config } from '#server/config.ts'
 import type { AppContext } from '#server/context.ts'
+import { createLog } from '#server/http/request-log.ts'
 import { runServer } from '#server/run-server.ts'
 import { createAgent, type Agent } from '#tests/support/agent.ts'
 import { createTestClock, type TestClock } from '#tests/support/clock.ts'
@@ -53,7 +53,7 @@ export async function startTestServer(options: TestServerOptions = {}): Promise<
   const config = testConfig(file, options.config)
   const clock = createTestClock()
   const logged: string[] = []
-  const log = pino({ level: config.logLevel }, { write: (line: string) => void logged.push(line) })
+  const log = createLog(config, { write: (line) => void logged.push(line) })
   const context: AppContext = { config, database, compute: createCompute(), log, clock, ...options.context }
   const server = await runServer(context)
   const factories = createFactories(database, clock)

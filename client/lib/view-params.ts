@@ -1,5 +1,9 @@
 /** What a waveform page shows, as its address holds it: span, cursors and playhead, in seconds from power-on. */
-import type { Cursors, View } from '#client/components/charts/chart-types.ts'
+
+/** Visible span, [from, to]. */
+type View = readonly [from: number, to: number]
+/** The two cursors; null while one is not placed. */
+type Cursors = readonly [first: number | null, second: number | null]
 
 export interface ViewState {
   view: View

@@ -37,8 +37,6 @@ function Nothing({ filtered, onShowAll }: { filtered: boolean; onShowAll: () => 
 export function RunListPage() {
   const [params, change] = useListParams(listRunsSchema)
   const [picked, setPicked] = useState<readonly RunSummary[]>([])
-  // A new key lets the search field start afresh when the filters are dropped from outside it.
-  const [resets, setResets] = useState(0)
   const list = useQuery(runQueries.list(params))
   const rows = list.data?.items ?? []
   const filtered = Boolean(params.search || params.designId || params.authorId)
@@ -46,21 +44,19 @@ export function RunListPage() {
     isPicked: (run) => picked.some((other) => other.id === run.id),
     onPick: (run) => setPicked(togglePick(picked, run)),
   }
-  const showAll = () => {
-    change(noFilters)
-    setResets(resets + 1)
-  }
 
   return (
     <>
       <PageTitle>Runs</PageTitle>
       <PageHeader title="Runs" />
       <Card>
-        <RunFilters key={resets} params={params} shown={rows} onChange={change} />
+        <RunFilters params={params} shown={rows} onChange={change} />
         {rows.length > 0 && <PickBar picked={picked} onClear={() => setPicked([])} />}
         {list.isPending && <Loading label="Loading runs" />}
         {list.error && <ErrorState error={list.error} retry={() => void list.refetch()} />}
-        {list.data && !list.error && rows.length === 0 && <Nothing filtered={filtered} onShowAll={showAll} />}
+        {list.data && !list.error && rows.length === 0 && (
+          <Nothing filtered={filtered} onShowAll={() => change(noFilters)} />
+        )}
         {rows.length > 0 && !list.error && (
           <DataTable
             caption="Saved runs"

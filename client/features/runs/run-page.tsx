@@ -37,7 +37,7 @@ function RunHeader({ run }: { run: Run }) {
       over={
         <>
           {run.project.name} ·{' '}
-          <Link to={`/designs/${run.design.id}`} className="text-petrol">
+          <Link to={`/designs/${run.design.id}`} className="text-petrol underline">
             {run.design.name}
           </Link>
         </>
@@ -88,6 +88,7 @@ export function RunPage({ runId }: { runId: number }) {
     return (
       <>
         <PageTitle>Run</PageTitle>
+        <PageHeader title="Run" />
         {error ? <ErrorState error={error} retry={retry} /> : <Loading label="Loading the run" />}
       </>
     )

@@ -1,15 +1,12 @@
 import { useQuery } from '@tanstack/react-query'
-import { useEffect, useEffectEvent, useState } from 'react'
 import { Field } from '#client/components/ui/field.tsx'
 import { Select } from '#client/components/ui/select.tsx'
 import { TextInput } from '#client/components/ui/text-input.tsx'
 import { runQueries } from '#client/features/runs/queries.ts'
 import { useSession } from '#client/lib/session.ts'
-import { useDebounced } from '#client/lib/use-debounced.ts'
+import { useSearchText } from '#client/lib/use-search-text.ts'
+import { limits } from '#shared/limits.ts'
 import type { ListRuns, RunSummary } from '#shared/schemas/run.ts'
-
-/** Rest after the last key before the list is asked for, ms. */
-const typingRest = 250
 
 interface Option {
   id: number
@@ -58,13 +55,7 @@ export interface RunFiltersProps {
 
 /** Search and filters of the list of runs. */
 export function RunFilters({ params, shown, onChange }: RunFiltersProps) {
-  const [text, setText] = useState(params.search)
-  const rested = useDebounced(text.trim(), typingRest)
-  const search = useEffectEvent((wanted: string) => {
-    if (wanted !== params.search) onChange({ search: wanted })
-  })
-  useEffect(() => search(rested), [rested])
-
+  const [text, setText] = useSearchText(params.search, (search) => onChange({ search }))
   const designs = useQuery(runQueries.designs())
   const { person } = useSession()
   const shownDesigns = shown.map((run) => run.design)
@@ -72,7 +63,12 @@ export function RunFilters({ params, shown, onChange }: RunFiltersProps) {
   return (
     <div role="search" className="flex flex-wrap gap-3 border-b border-hair px-4 py-3">
       <Field label="Search titles, notes and designs" className="min-w-48 grow basis-64">
-        <TextInput type="search" value={text} onChange={(event) => setText(event.target.value)} />
+        <TextInput
+          type="search"
+          maxLength={limits.nameLength}
+          value={text}
+          onChange={(event) => setText(event.target.value)}
+        />
       </Field>
       <Choice
         label="Design"

@@ -15,6 +15,7 @@ import { saveFailure } from '#client/features/runs/lib/save-failure.ts'
 import { runMutations } from '#client/features/runs/queries.ts'
 import { ApiError } from '#client/lib/api.ts'
 import { showProblem } from '#client/lib/form-problem.ts'
+import { useIncludesRole } from '#client/lib/session.ts'
 import { createRunSchema } from '#shared/schemas/run.ts'
 import type { RunInputs } from '#shared/schemas/simulation.ts'
 
@@ -39,7 +40,12 @@ export interface SaveRunDialogProps {
   disabled?: boolean
 }
 
-export function SaveRunDialog({ design, inputs, disabled }: SaveRunDialogProps) {
+/** Only for those who may save runs. */
+export function SaveRunDialog(props: SaveRunDialogProps) {
+  return useIncludesRole('engineer') ? <SaveRun {...props} /> : null
+}
+
+function SaveRun({ design, inputs, disabled }: SaveRunDialogProps) {
   const [open, setOpen] = useState(false)
   const formId = useId()
   const queryClient = useQueryClient()

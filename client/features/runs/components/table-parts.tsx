@@ -13,7 +13,7 @@ export interface PlainTableProps {
 /** Wider than its place, it scrolls within its card. The first column is text, the rest numbers. */
 export function PlainTable({ caption, heads, children }: PlainTableProps) {
   return (
-    <div className="overflow-x-auto" role="region" aria-label={caption} tabIndex={0}>
+    <div className="overflow-x-auto" role="group" aria-label={caption} tabIndex={0}>
       <table className="w-full border-collapse">
         <caption className="sr-only">{caption}</caption>
         <thead className="border-b border-line text-sm text-soft">
@@ -33,7 +33,7 @@ export function PlainTable({ caption, heads, children }: PlainTableProps) {
 
 export function RowHead({ children, note }: { children: ReactNode; note?: string }) {
   return (
-    <th scope="row" className="min-w-40 px-4 py-1.5 text-left align-baseline font-normal">
+    <th scope="row" className="min-w-34 px-4 py-1.5 sm:min-w-40 text-left align-baseline font-normal">
       {children} {note && <span className="block max-w-prose text-sm text-soft">{note}</span>}
     </th>
   )

@@ -61,7 +61,7 @@ describe('RunPage', () => {
     const other: Person = { ...reviewer, role }
     serve(stored())
     renderRuns(<RunPage runId={7} />, { viewer: other })
-    await screen.findByRole('heading', { level: 1 })
+    await screen.findByRole('heading', { level: 1, name: 'First article' })
     const offered = screen.queryByRole('button', { name: 'Delete' }) !== null
     expect(offered).toBe(role === 'admin')
   })

@@ -3,7 +3,7 @@ import userEvent from '@testing-library/user-event'
 import { afterEach, describe, expect, it, vi } from 'vitest'
 import { SaveRunDialog } from '#client/features/runs/components/save-run-dialog.tsx'
 import { json, problem, renderRuns, serve } from '#tests/client/features/runs/support/render-runs.tsx'
-import { makeRun } from '#tests/client/features/runs/support/runs.ts'
+import { makeRun, reviewer } from '#tests/client/features/runs/support/runs.ts'
 
 const run = makeRun()
 const dialog = <SaveRunDialog design={run.design} inputs={run.inputs} />
@@ -22,6 +22,11 @@ async function openAndType() {
 afterEach(() => vi.unstubAllGlobals())
 
 describe('SaveRunDialog', () => {
+  it('is not offered to a technician', () => {
+    renderRuns(dialog, { viewer: { ...reviewer, role: 'technician' } })
+    expect(screen.queryByRole('button', { name: 'Save run' })).toBeNull()
+  })
+
   it('says that the server computes again', async () => {
     renderRuns(dialog)
     await userEvent.click(saveButton())

@@ -20,13 +20,13 @@ const count = new Intl.NumberFormat('en')
 
 function Progress({ done, onCancel }: { done: number; onCancel?: () => void }) {
   return (
-    <div className="late flex grow items-center gap-3">
+    <div className="late flex grow flex-wrap items-center gap-x-3">
       <span className="whitespace-nowrap">Computing the record, {formatPercent(done, { digits: 2 })}</span>
       <progress
         aria-label="Computing the record"
         value={done}
         max={1}
-        className="h-1.5 max-w-60 min-w-16 grow accent-petrol"
+        className="h-1.5 w-16 max-w-60 grow appearance-none overflow-hidden rounded-full bg-line [&::-moz-progress-bar]:bg-petrol [&::-webkit-progress-bar]:bg-line [&::-webkit-progress-value]:bg-petrol"
       />
       {onCancel && (
         <Button variant="quiet" onClick={onCancel}>

@@ -10,6 +10,7 @@ export const leastSpan = (sampleInterval: number) => leastSamples * sampleInterv
 /** `view` moved and widened as little as it takes to lie within `whole` and span at least `least`. */
 export function clampView(view: View, whole: View, least: number): View {
   const longest = whole[1] - whole[0]
+  if (view[0] >= whole[0] && view[1] <= whole[1] && view[1] - view[0] >= least) return view
   const span = Math.min(longest, Math.max(least, view[1] - view[0]))
   if (span === longest) return whole
   const centre = (view[0] + view[1]) / 2

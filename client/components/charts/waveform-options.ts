@@ -36,6 +36,8 @@ export function waveformOptions(input: WaveformOptionsInput): uPlot.Options {
   const line = (look: Partial<uPlot.Series>): uPlot.Series => ({
     points: { show: false },
     spanGaps: true,
+    // Lines arrive thinned: rounding them to whole pixels would only put steps into them.
+    pxAlign: 0,
     ...look,
   })
   return {

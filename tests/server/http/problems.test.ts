@@ -1,6 +1,6 @@
 import { request as httpRequest } from 'node:http'
 import request from 'supertest'
-import { afterAll, beforeAll, describe, expect, it } from 'vitest'
+import { afterAll, beforeAll, describe, expect, it, vi } from 'vitest'
 import { problemSchema } from '#shared/schemas/problem.ts'
 import type { Design } from '#shared/schemas/design.ts'
 import type { Agent } from '#tests/support/agent.ts'
@@ -123,8 +123,7 @@ describe('an error answer (RFC 9457)', () => {
 
   it('hides what it did not foresee, and logs it under the same number', async () => {
     const { Project } = server.context.database.models
-    const findAll = Project.findAll.bind(Project)
-    Project.findAll = () => Promise.reject(new Error('SELECT secret FROM people'))
+    const broken = vi.spyOn(Project, 'findAll').mockRejectedValueOnce(new Error('SELECT secret FROM people'))
     try {
       const answer = await engineer.get('/api/projects')
       expectProblem(answer, 500, 'internal')
@@ -134,18 +133,16 @@ describe('an error answer (RFC 9457)', () => {
       const line = server.logged.find((text) => text.includes('SELECT secret'))
       expect(JSON.parse(line!)).toMatchObject({ level: 50, requestId })
     } finally {
-      Project.findAll = findAll
+      broken.mockRestore()
     }
   })
 
   it('says 503 when the database does not answer', async () => {
-    const { database } = server.context
-    const ping = database.ping.bind(database)
-    database.ping = () => Promise.reject(new Error('gone'))
+    const broken = vi.spyOn(server.context.database, 'ping').mockRejectedValueOnce(new Error('gone'))
     try {
       expectProblem(await request(server.url).get('/api/health'), 503, 'database')
     } finally {
-      database.ping = ping
+      broken.mockRestore()
     }
   })
 })

@@ -74,7 +74,7 @@ export function RecordFrame({ live, children }: RecordFrameProps) {
       )}
       <StatusLine live={live} />
       {simulation && (
-        <div className={classNames('transition-opacity', stale && 'opacity-60 delay-300')}>
+        <div className={classNames('transition-[filter]', stale && 'grayscale delay-300')}>
           {children(simulation)}
         </div>
       )}

@@ -9,11 +9,11 @@ import { createLane } from '#client/workers/lane.ts'
 import { createRecordQueue } from '#client/workers/record-queue.ts'
 
 /**
- * How long (ms since its start) a record may still run once a newer request waits: long enough for the record of an
- * ordinary 1 kHz circuit by the stepping integrator, so that the figures follow a moving trim slider; short enough
- * that nobody waits noticeably for the values that he or she stopped at.
+ * How long (ms since its start) a record may still run once a newer request waits. Longer than the record of an ordinary
+ * 1 kHz circuit by the stepping integrator on a slow machine, so that the figures follow a moving trim slider and the
+ * worker stays warm; a record of many seconds, on the other hand, has long had its grace when the next edit comes.
  */
-export const graceTime = 400
+export const graceTime = 1000
 
 export interface OwnedEngine extends EngineClient {
   /** Ends every worker. Requests under way reject with an `AbortError`. */
@@ -26,8 +26,12 @@ export function createEngineClient(connect: Connect = connectWorker, grace = gra
   const queue = createRecordQueue(records, grace)
   return {
     smallSignal: (circuit) => quick.call((connection) => connection.smallSignal(circuit)),
-    run: (inputs, { signal, onProgress } = {}) =>
-      queue.add((connection) => connection.run(inputs, onProgress && proxy(onProgress)), signal),
+    run(inputs, { signal, onProgress } = {}) {
+      // Progress comes through a port of its own and may be overtaken by the answer: then it is no news.
+      let settled = false
+      const report = onProgress && proxy((done: number) => void (settled || onProgress(done)))
+      return queue.add((connection) => connection.run(inputs, report), signal).finally(() => (settled = true))
+    },
     dispose() {
       queue.clear()
       quick.end()

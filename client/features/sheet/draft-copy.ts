@@ -16,32 +16,34 @@ export type DraftCopy = z.infer<typeof draftCopySchema>
 const key = (personId: number, designId: number) => `sinewright.draft.${personId}.${designId}`
 
 export interface DraftCopies {
+  /** The copy, or null: a text that is none any more (another release wrote it) counts as none. */
   read(): DraftCopy | null
-  keep(version: number, content: DraftContent): void
+  /** Whether it was kept: the browser's storage may be full or forbidden. */
+  keep(version: number, content: DraftContent): boolean
   forget(): void
 }
 
-/**
- * @param storage the browser's own, which may be full or forbidden: then there is no copy, and nothing else changes
- */
+function parse(text: string): unknown {
+  try {
+    return JSON.parse(text)
+  } catch {
+    return null
+  }
+}
+
 export function draftCopies(personId: number, designId: number, storage: Storage): DraftCopies {
   const name = key(personId, designId)
   return {
     read() {
-      try {
-        const text = storage.getItem(name)
-        const parsed = draftCopySchema.safeParse(text === null ? null : JSON.parse(text))
-        return parsed.success ? parsed.data : null
-      } catch (error) {
-        console.warn('An unsaved copy of this draft could not be read.', error)
-        return null
-      }
+      const parsed = draftCopySchema.safeParse(parse(storage.getItem(name) ?? 'null'))
+      return parsed.success ? parsed.data : null
     },
     keep(version, content) {
       try {
         storage.setItem(name, JSON.stringify({ version, at: new Date().toISOString(), content }))
-      } catch (error) {
-        console.warn('The unsaved draft could not be kept in this browser.', error)
+        return true
+      } catch {
+        return false
       }
     },
     forget: () => storage.removeItem(name),

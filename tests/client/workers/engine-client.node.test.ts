@@ -9,7 +9,12 @@ import type { SmallSignal } from '#sim/types.ts'
 /** Workers that answer when the test says so. */
 function fakeWorkers() {
   const workers: {
-    runs: { inputs: RunInputs; answer: (result: RecordResult) => void; fail: (error: Error) => void }[]
+    runs: {
+      inputs: RunInputs
+      progress?: (done: number) => void
+      answer: (result: RecordResult) => void
+      fail: (error: Error) => void
+    }[]
     smallSignals: ((answer: SmallSignal) => void)[]
     terminated: boolean
     die: (reason: string) => void
@@ -19,7 +24,8 @@ function fakeWorkers() {
     workers.push(worker)
     const connection: EngineConnection = {
       smallSignal: () => new Promise((resolve) => worker.smallSignals.push(resolve)),
-      run: (inputs) => new Promise((answer, fail) => worker.runs.push({ inputs, answer, fail })),
+      run: (inputs, progress) =>
+        new Promise((answer, fail) => worker.runs.push({ inputs, progress, answer, fail })),
       terminate: () => void (worker.terminated = true),
     }
     return connection
@@ -52,6 +58,20 @@ describe('the record lane', () => {
     busy().runs[0]!.answer(record(11))
     expect(await answer).toEqual(record(11))
     expect(workers).toHaveLength(2)
+  })
+
+  it('reports progress, but none that the answer has overtaken', async () => {
+    const { connect, busy } = fakeWorkers()
+    const shares: number[] = []
+    const answer = createEngineClient(connect, grace).run(inputs(1), {
+      onProgress: (done) => shares.push(done),
+    })
+    const [run] = busy().runs
+    run!.progress?.(0.5)
+    run!.answer(record(11))
+    await answer
+    run!.progress?.(1)
+    expect(shares).toEqual([0.5])
   })
 
   it('lets a record finish within its grace, then takes the newest request and drops those between', async () => {

@@ -4,7 +4,7 @@ import type { DraftSaving } from '#client/features/sheet/hooks/use-autosave.ts'
 import { formatAge } from '#client/lib/dates.ts'
 import type { SaveStatus } from '#client/features/sheet/autosave.ts'
 
-function words(status: SaveStatus, invalid: boolean): { tone: ChipTone; text: string } {
+function words(status: SaveStatus, kept: boolean, invalid: boolean): { tone: ChipTone; text: string } {
   switch (status.kind) {
     case 'saved':
       return invalid
@@ -15,7 +15,9 @@ function words(status: SaveStatus, invalid: boolean): { tone: ChipTone; text: st
     case 'saving':
       return { tone: 'plain', text: 'saving…' }
     case 'offline':
-      return { tone: 'warn', text: 'offline: kept in this browser, tried again by itself' }
+      return kept
+        ? { tone: 'warn', text: 'offline: kept in this browser, tried again by itself' }
+        : { tone: 'bad', text: 'offline: not saved anywhere yet, keep this page open' }
     case 'refused':
       return { tone: 'bad', text: `not saved: ${status.sentence}` }
     case 'conflict':
@@ -25,7 +27,7 @@ function words(status: SaveStatus, invalid: boolean): { tone: ChipTone; text: st
 
 /** Whether the draft is safe. */
 export function SavedChip({ saving, invalid }: { saving: DraftSaving; invalid: boolean }) {
-  const { tone, text } = words(saving.status, invalid)
+  const { tone, text } = words(saving.status, saving.kept, invalid)
   const again = saving.status.kind === 'offline' || saving.status.kind === 'refused'
   return (
     <span role="status" className="inline-flex max-w-full flex-wrap items-center gap-1">

@@ -11,6 +11,8 @@ import type { DraftContent } from '#shared/schemas/simulation.ts'
 
 export interface DraftSaving {
   status: SaveStatus
+  /** Whether unsaved edits are safe in this browser meanwhile. */
+  kept: boolean
   /** Edits of an earlier visit that never reached the server; null when there are none or they were dealt with. */
   copy: DraftCopy | null
   restoreCopy: () => void
@@ -36,6 +38,7 @@ export function useAutosave({ design, content, readOnly, show }: AutosaveInputs)
     [session.person.id, design.id],
   )
   const [status, setStatus] = useState<SaveStatus>({ kind: 'saved', at: design.draft.savedAt })
+  const [kept, setKept] = useState(true)
   const [copy, setCopy] = useState(() => {
     const found = readOnly ? null : copies.read()
     return found && !sameContent(found.content, design.draft.content) ? found : null
@@ -68,7 +71,7 @@ export function useAutosave({ design, content, readOnly, show }: AutosaveInputs)
 
   useEffect(() => {
     autosave.current?.change(content)
-    if (autosave.current?.pending()) copies.keep(version.current, content)
+    if (autosave.current?.pending()) setKept(copies.keep(version.current, content))
   }, [content, copies])
 
   // A session that was renewed over the page: what was refused for want of it goes now.
@@ -101,6 +104,7 @@ export function useAutosave({ design, content, readOnly, show }: AutosaveInputs)
 
   return {
     status,
+    kept,
     copy,
     restoreCopy() {
       if (!copy) return

@@ -3,8 +3,8 @@ import { compare, getRounds, hash } from 'bcryptjs'
 import { afterEach, describe, expect, it, vi } from 'vitest'
 import { createPasswordCheck } from '#server/identity/passwords.ts'
 
-vi.mock('bcryptjs', async (original) => {
-  const actual = await original<typeof import('bcryptjs')>()
+vi.mock(import('bcryptjs'), async (original) => {
+  const actual = await original()
   return { ...actual, compare: vi.fn(actual.compare) }
 })
 afterEach(() => vi.mocked(compare).mockClear())

@@ -6,6 +6,7 @@ import { waveformTable } from '#client/components/charts/plot-table.ts'
 import { WaveformChart } from '#client/components/charts/waveform-chart.tsx'
 import { Field } from '#client/components/ui/field.tsx'
 import { Select } from '#client/components/ui/select.tsx'
+import { PlotHints } from '#client/features/runs/components/plot-hints.tsx'
 import { keyItem, recordEnd } from '#client/features/runs/lib/record-series.ts'
 import { comparedSeries, type Side } from '#client/features/runs/lib/compared-series.ts'
 import { useViewParams } from '#client/lib/use-view-params.ts'
@@ -52,9 +53,7 @@ export function ComparePlot({ a, b }: { a: Side; b: Side }) {
         view={view}
         onViewChange={(next) => change({ view: next })}
       />
-      <p className="px-2 pt-1.5 text-right text-sm text-soft">
-        Drag to zoom, click to place a cursor, double-click for the whole record.
-      </p>
+      <PlotHints view={view} end={end} onViewChange={(next) => change({ view: next })} />
     </PlotCard>
   )
 }

@@ -8,6 +8,7 @@ import { waveformTable } from '#client/components/charts/plot-table.ts'
 import { WaveformChart } from '#client/components/charts/waveform-chart.tsx'
 import { Checkbox } from '#client/components/ui/checkbox.tsx'
 import { PlayheadBar } from '#client/features/runs/components/playhead-bar.tsx'
+import { PlotHints } from '#client/features/runs/components/plot-hints.tsx'
 import { RunCircuit } from '#client/features/runs/components/run-circuit.tsx'
 import { usePlayhead } from '#client/features/runs/hooks/use-playhead.ts'
 import { follow, modeAt, speedChoices, usualSpeed } from '#client/features/runs/lib/playhead.ts'
@@ -105,9 +106,7 @@ export function RecordViewer({ run, columns }: RecordViewerProps) {
           view={view}
           onViewChange={(next) => change({ view: next })}
         />
-        <p className="px-2 pt-1.5 text-right text-sm text-soft">
-          Drag to zoom, click to place a cursor, double-click for the whole record.
-        </p>
+        <PlotHints view={view} end={end} onViewChange={(next) => change({ view: next })} />
       </PlotCard>
     </div>
   )

@@ -63,7 +63,7 @@ export function runColumns(picking: Picking): ColumnDef<RunSummary, unknown>[] {
           <Link to={`/designs/${run.design.id}`} className="text-ink wrap-anywhere">
             {run.design.name}
           </Link>
-          <p className="text-sm text-soft">{run.project.name}</p>
+          <p className="line-clamp-1 text-sm text-soft wrap-anywhere">{run.project.name}</p>
         </>
       ),
     },
@@ -77,7 +77,7 @@ export function runColumns(picking: Picking): ColumnDef<RunSummary, unknown>[] {
       id: 'author',
       header: 'Saved by',
       enableSorting: true,
-      cell: ({ row }) => <span className="whitespace-nowrap">{row.original.author.name}</span>,
+      cell: ({ row }) => <span className="xl:whitespace-nowrap">{row.original.author.name}</span>,
     },
     {
       id: 'createdAt',

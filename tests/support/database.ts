@@ -1,4 +1,4 @@
-import { copyFile, mkdtemp, rm } from 'node:fs/promises'
+import { mkdtemp, readFile, rm, writeFile } from 'node:fs/promises'
 import { tmpdir } from 'node:os'
 import { join } from 'node:path'
 import { openDatabase, type Database } from '#server/db/database.ts'
@@ -9,16 +9,17 @@ export async function temporaryFolder() {
   return { path, remove: () => rm(path, { recursive: true, force: true }) }
 }
 
-let base: Promise<string> | null = null
+let base: Promise<Buffer> | null = null
 
-/** An empty database with every migration applied, made once per test file and copied from then on. */
-async function migratedBase(): Promise<string> {
-  const { path } = await temporaryFolder()
-  const file = join(path, 'base.sqlite')
-  process.once('exit', () => void rm(path, { recursive: true, force: true }))
+/** The file of an empty database with every migration applied, made once per test file and copied from then on. */
+async function migratedBase(): Promise<Buffer> {
+  const folder = await temporaryFolder()
+  const file = join(folder.path, 'base.sqlite')
   const database = await openDatabase(file)
   await database.close()
-  return file
+  const bytes = await readFile(file)
+  await folder.remove()
+  return bytes
 }
 
 /** A real, migrated, empty SQLite file and its open database. */
@@ -30,7 +31,7 @@ export async function createTestDatabase(): Promise<{
   base ??= migratedBase()
   const folder = await temporaryFolder()
   const file = join(folder.path, 'test.sqlite')
-  await copyFile(await base, file)
+  await writeFile(file, await base)
   const database = await openDatabase(file)
   return {
     database,

@@ -1,10 +1,11 @@
 /** Whether an account exists must not show in the work of a refusal. Counted in bcrypt calls and rounds, not in time. */
+import type * as bcrypt from 'bcryptjs'
 import { compare, getRounds, hash } from 'bcryptjs'
 import { afterEach, describe, expect, it, vi } from 'vitest'
 import { createPasswordCheck } from '#server/identity/passwords.ts'
 
-vi.mock(import('bcryptjs'), async (original) => {
-  const actual = await original()
+vi.mock('bcryptjs', async (original) => {
+  const actual = await original<typeof bcrypt>()
   return { ...actual, compare: vi.fn(actual.compare) }
 })
 afterEach(() => vi.mocked(compare).mockClear())

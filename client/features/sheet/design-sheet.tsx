@@ -33,10 +33,10 @@ export function DesignSheet({ state, pages, actions, children }: DesignSheetProp
         <PageTabs pages={pages} />
         <div className="grid grid-cols-[minmax(0,1fr)] gap-x-5 gap-y-4 pt-5 lg:grid-cols-[minmax(0,24rem)_minmax(0,1fr)] lg:grid-rows-[auto_1fr] xl:grid-cols-[minmax(0,27rem)_minmax(0,1fr)]">
           <div className="flex flex-col gap-3 lg:col-start-2">
-            <SheetNotices {...{ design, readOnly, saving, invalid }} />
+            <SheetNotices {...{ design, readOnly, saving }} />
             <VerdictSentence live={live} circuit={content.circuit} />
             <VerdictLine live={live} />
-            <CautionList live={live} circuit={content.circuit} />
+            <CautionList live={live} circuit={content.circuit} invalid={invalid} />
           </div>
           <div className="lg:col-start-1 lg:row-span-2 lg:row-start-1">
             <CircuitCard live={live} />

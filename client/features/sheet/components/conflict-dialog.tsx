@@ -35,7 +35,11 @@ export function ConflictDialog({ mine, theirs, onKeepMine, onTakeTheirs }: Confl
       {rows.length === 0 ? (
         <p>Both sides hold the same values.</p>
       ) : (
-        <table className="w-full text-sm">
+        <table
+          // Takes the focus, so that a key still being typed presses no button.
+          tabIndex={0}
+          className="w-full text-sm"
+        >
           <thead>
             <tr className="border-b border-line text-left text-soft">
               <th className="py-1.5 pr-3 font-medium">Value</th>

@@ -1,4 +1,4 @@
-/** What the person should know before editing: no permission, edits of an earlier visit, values that are not computed. */
+/** What the person should know before editing: no permission, edits of an earlier visit. */
 import { Button } from '#client/components/ui/button.tsx'
 import { Notice } from '#client/components/ui/notice.tsx'
 import type { DraftSaving } from '#client/features/sheet/hooks/use-autosave.ts'
@@ -9,10 +9,9 @@ export interface SheetNoticesProps {
   design: Design
   readOnly: boolean
   saving: DraftSaving
-  invalid: boolean
 }
 
-export function SheetNotices({ design, readOnly, saving, invalid }: SheetNoticesProps) {
+export function SheetNotices({ design, readOnly, saving }: SheetNoticesProps) {
   const { copy } = saving
   return (
     <>
@@ -37,12 +36,6 @@ export function SheetNotices({ design, readOnly, saving, invalid }: SheetNotices
           }
         >
           This browser kept them on {formatMoment(copy.at)}.
-        </Notice>
-      )}
-      {invalid && (
-        <Notice tone="warn">
-          A marked field holds something that cannot be computed. What you see and what is saved are the last
-          valid values.
         </Notice>
       )}
     </>

@@ -14,11 +14,18 @@ function factsOf({ simulation, grid, stale }: LiveResult): RecordFacts | null {
   return simulation && grid && !stale ? { figures: simulation.figures, duration: grid.duration } : null
 }
 
+const noAnswer = 'There is no answer for these values. Change one to try again.'
+
 /** The first thing that is read on the sheet; announced when it has changed. */
 export function VerdictSentence({ live, circuit }: { live: LiveResult; circuit: Circuit }) {
   const phrases = live.smallSignal
     ? verdict(live.smallSignal, circuit, factsOf(live))
-    : [{ text: live.failure?.sentence ?? 'Computing whether it starts…' }]
+    : [
+        {
+          text:
+            live.failure?.sentence ?? (live.progress === null ? noAnswer : 'Computing whether it starts…'),
+        },
+      ]
   return (
     <p role="status" className="min-h-[2.7em] text-[1.25rem] leading-[1.35] text-pretty">
       {phrases.map(({ text, mark }, index) =>

@@ -7,7 +7,8 @@ import type { Circuit } from '#shared/schemas/circuit.ts'
 import type { Failure } from '#sim/types.ts'
 import { startingDraft } from '#shared/starting-draft.ts'
 import { axeViolations } from '#tests/support/axe.ts'
-import { aFullDesign } from '#tests/support/client-data.ts'
+import { sessionQueries } from '#client/lib/session.ts'
+import { aFullDesign, aSession } from '#tests/support/client-data.ts'
 import { answer, problem } from '#tests/support/fake-api.ts'
 import {
   fakeEngine,
@@ -232,6 +233,25 @@ describe('saving', () => {
     await second.user.click(screen.getByRole('button', { name: 'Bring them back' }))
     expect(content().gain.groundR).toBe(11e3)
     await waitFor(() => expect(second.saved()).toHaveLength(1), { timeout: 3000 })
+  })
+
+  it('saves what an ended session kept from being saved, once somebody is signed in again', async () => {
+    const { user, api, saved, client, design } = await renderSheet()
+    const route = `PUT /api/designs/${design.id}/draft`
+    api.set(route, problem(401, 'signed-out', { detail: 'The session has ended.' }))
+    await user.type(field('ground R'), '{ArrowUp}')
+    expect(await screen.findByText('not saved: The session has ended.', {}, { timeout: 3000 })).toBeVisible()
+    api.set(route, answer({ ...design.draft, version: 2, savedAt: new Date().toISOString() }))
+    act(
+      () =>
+        void client.setQueryData(
+          sessionQueries.current().queryKey,
+          aSession('engineer', { csrfToken: 'new' }),
+        ),
+    )
+    await waitFor(() => expect(saved()).toHaveLength(2))
+    expect(await screen.findByText('draft, saved just now')).toBeVisible()
+    expect(content().gain.groundR).toBe(11e3)
   })
 
   it('forgets a copy that is not wanted', async () => {

@@ -20,12 +20,15 @@ import { startLevel } from '#sim/start-level.ts'
 import type { Failure, SimulateOptions, Simulation, SmallSignal } from '#sim/types.ts'
 import { mostEvaluations, predictedEvaluations } from '#sim/work.ts'
 
-/** Relative tolerance of the integrator. */
-const tolerance = 1e-7
+/** Error per step relative to the amplitude, and the same while a stiff amplifier keeps the steps short anyway. */
+const tolerance = 1e-9
+const stiffTolerance = 1e-7
 /** Longest integration step as a share of 1/ω0 · 2π. */
 const stepsPerPeriod = 8
 /** First step after a mode change, in time constants of the fastest pole. */
 const firstStepShare = 0.5
+/** Time constants of the fastest pole in a period beyond which stability limits the steps more than accuracy. */
+const stiffness = 500
 /** Advances between two looks at the caller's wishes. */
 const advancesPerLook = 128
 
@@ -88,11 +91,14 @@ function machineFor(circuit: Circuit, options: SimulateOptions, linear: SmallSig
     plant,
     pieces: railPieces(circuit, options.stimulus),
     tolerance,
+    stiffTolerance,
     smallest: plant.dimension === 4 ? [volts, volts, volts, 1] : [volts, volts, volts],
     scale,
     shortTime: firstStepShare / fastest,
     longestStep: period / stepsPerPeriod,
-    longestLinearStep: Math.min(period / stepsPerPeriod, stableReach / fastest),
+    longestLinearStep: fastest * period > stiffness ? stableReach / fastest : period / stepsPerPeriod,
+    period,
+    stiff: fastest * period > stiffness,
     work: new WorkMeter(mostEvaluations),
   })
 }

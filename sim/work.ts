@@ -2,16 +2,16 @@
 import type { SmallSignal } from '#sim/types.ts'
 
 /** Evaluations of the equations in one computation: some seconds. */
-export const mostEvaluations = 30_000_000
+export const mostEvaluations = 24_000_000
 /** Evaluations per time constant of the fastest pole, whose decay limits an explicit integrator's steps. */
 const perTimeConstant = 2.2
-/** Evaluations per period where accuracy limits the steps. */
-const perPeriod = 200
+/** Evaluations per period where accuracy does. */
+const perPeriod = 1500
 
 /** Evaluations that `duration` seconds will take, about. */
 export function predictedEvaluations({ poles, frequency }: SmallSignal, duration: number): number {
   const fastest = poles.reduce((most, { re, im }) => Math.max(most, Math.hypot(re, im)), 0)
-  return duration * (fastest * perTimeConstant + frequency * perPeriod)
+  return duration * Math.max(fastest * perTimeConstant, frequency * perPeriod)
 }
 
 /** Evaluations that a record whose length is chosen here may take, unless it would show next to nothing. */

@@ -5,6 +5,7 @@
  */
 import { railAt, type RailPiece } from '#sim/circuit/rails.ts'
 import { voIndex, type Plant } from '#sim/circuit/plant.ts'
+import { Amplitude } from '#sim/modes/amplitude.ts'
 import { guardsOf, modeAt, motion, nextMode } from '#sim/modes/mode.ts'
 import { firstFiring, Stretch, watch, type Firing } from '#sim/modes/stretch.ts'
 import { integrate, type IntegrationOutcome, type WorkMeter } from '#sim/ode/integrate.ts'
@@ -31,9 +32,11 @@ export interface Observer {
 export interface MachineSettings {
   plant: Plant
   pieces: readonly RailPiece[]
-  /** Relative to the states' scales. */
+  /** Error allowed per step, relative to the states' present size. */
   tolerance: number
-  /** Least size of each state that matters, in its unit. */
+  /** The same where a stiff amplifier keeps the steps far shorter than accuracy asks for. */
+  stiffTolerance: number
+  /** Sizes below which the states do not matter, each in its unit. */
   smallest: number[]
   /** Volts that count as large in this circuit. */
   scale: number
@@ -43,12 +46,18 @@ export interface MachineSettings {
   longestStep: number
   /** The same in the linear mode, where the amplifier's own pole limits it, s. */
   longestLinearStep: number
+  /** About one period, s. */
+  period: number
+  /** Whether the amplifier's own pole, not accuracy, limits the steps in the linear mode. */
+  stiff: boolean
   work: WorkMeter
 }
 
 export type MotionOutcome =
   'reachedEnd' | 'stopped' | 'modesDoNotRest' | Exclude<IntegrationOutcome, 'endedByObserver' | 'reachedEnd'>
 
+/** Periods after which the integrator is set to the amplitude anew. */
+const periodsPerSetting = 8
 /** Looks at the guards per longest step. */
 const looksPerLongestStep = 8
 /** Mode changes in a row that take no time before the machine gives up. */
@@ -58,9 +67,11 @@ export class Machine {
   /** Mode changes located so far. */
   events = 0
   private readonly stretch: Stretch
+  private readonly amplitude: Amplitude
 
   constructor(readonly settings: MachineSettings) {
     this.stretch = new Stretch(settings.plant.dimension)
+    this.amplitude = new Amplitude(settings.smallest, settings.period)
   }
 
   /** Position at power-on. */
@@ -71,17 +82,19 @@ export class Machine {
 
   /** Moves `position` on until `end` (s) or until an observer stops it. */
   run(position: Position, end: number, observers: readonly Observer[]): MotionOutcome {
+    const { period } = this.settings
     let instantChanges = 0
     for (const observer of observers) observer.enter?.(position)
     while (position.t < end) {
       const before = position.t
       const piece = this.pieceAt(position.t)
-      const until = Math.min(end, piece.end)
+      const until = Math.min(end, piece.end, position.t + periodsPerSetting * period)
       const { outcome, firing } = this.runMode(position, piece, until, observers)
       if (outcome === 'stopped') return outcome
       if (outcome !== 'reachedEnd') return outcome
       if (firing) position.mode = nextMode(firing.guard.limit)
       else if (until === end) break
+      else if (until < piece.end) continue
       this.settle(position, piece)
       if (!firing)
         position.mode = modeAt(this.settings.plant, this.pieceAt(position.t), position.t, position.y)
@@ -105,9 +118,10 @@ export class Machine {
 
   /** One mode, from `position` to the first guard that fires or to `until`; moves `position` there. */
   private runMode(position: Position, piece: RailPiece, until: number, observers: readonly Observer[]) {
-    const { plant, tolerance, smallest, scale, shortTime, longestStep, longestLinearStep, work } =
-      this.settings
+    const { plant, scale, shortTime, longestStep, longestLinearStep, work } = this.settings
     const { stretch } = this
+    const stiff = this.settings.stiff && position.mode === 'linear'
+    const tolerance = stiff ? this.settings.stiffTolerance : this.settings.tolerance
     const { mode } = position
     const watched = guardsOf(plant, piece, mode, scale).map((guard) => watch(guard, position.t, position.y))
     let firing: Firing | null = null
@@ -118,13 +132,14 @@ export class Machine {
         start: position.t,
         end: until,
         initial: position.y,
-        relativeTolerance: tolerance,
-        absoluteTolerance: smallest.map((size) => size * tolerance),
+        tolerance: position.y.map((_value, index) => this.amplitude.size(index) * tolerance),
+        stiff,
         firstStep: Math.min(shortTime, until - position.t),
         longestStep: mode === 'linear' ? longestLinearStep : longestStep,
         work,
       },
       (from, to, y, dense) => {
+        this.amplitude.note(to, y)
         stretch.set(mode, from, to, y, dense)
         const looks = Math.max(1, Math.ceil(((to - from) / longestStep) * looksPerLongestStep))
         let a = from

@@ -12,7 +12,6 @@ export declare class Solver {
   maxStepSize: number
   maxExtrapolationColumns: number
   denseOutput: boolean
-  denseOutputErrorEstimator: boolean
   relativeTolerance: number | number[]
   absoluteTolerance: number | number[]
   solve(

@@ -1,4 +1,7 @@
-/** The few cycles worth a closer look: around the time to 90 %, or the last ones of the record. */
+/**
+ * The few cycles worth a closer look: around the time to 90 %, the first ones of what
+ * dies out, the last ones of what still grows.
+ */
 import type { View } from '#client/components/charts/chart-types.ts'
 import { clampView } from '#client/components/charts/view-range.ts'
 import type { Figures } from '#shared/figures.ts'
@@ -18,10 +21,9 @@ export function closeUp(figures: Figures | null, end: number): CloseUp | null {
   const frequency = figures?.frequency || figures?.linearFrequency
   if (!frequency) return null
   const half = cycles / 2 / frequency
-  const at = figures.timeTo90
-  const view = at === null ? ([end - 2 * half, end] as const) : ([at - half, at + half] as const)
-  return {
-    title: at === null ? 'The last eight cycles' : 'Eight cycles around 90 %',
-    view: clampView(view, [0, end], Math.min(2 * half, end)),
-  }
+  const whole: View = [0, end]
+  const around = (middle: number) => clampView([middle - half, middle + half], whole, Math.min(2 * half, end))
+  if (figures.timeTo90 !== null) return { title: 'Eight cycles around 90 %', view: around(figures.timeTo90) }
+  if ((figures.growthRate ?? 0) < 0) return { title: 'The first eight cycles', view: around(half) }
+  return { title: 'The last eight cycles', view: around(end - half) }
 }

@@ -38,6 +38,12 @@ describe('closeUp', () => {
     expect(view).toEqual([expect.closeTo(52e-3, 9), expect.closeTo(60e-3, 9)])
   })
 
+  it('shows the first eight of what dies out', () => {
+    const { title, view } = closeUp({ ...none, linearFrequency: 1000, growthRate: -600 }, 60e-3)!
+    expect(title).toBe('The first eight cycles')
+    expect(view).toEqual([0, expect.closeTo(8e-3, 9)])
+  })
+
   it('shows all of a record shorter than that, and nothing without a frequency', () => {
     expect(closeUp({ ...none, linearFrequency: 1000 }, 3e-3)!.view).toEqual([0, 3e-3])
     expect(closeUp({ ...none, linearFrequency: 0 }, 3e-3)).toBeNull()

@@ -1,9 +1,7 @@
 /** Declarations of our own for `odex` 2.0.4 (its sources fail strict checks). Only what the adapter uses. */
 
-export interface DenseOutput {
-  /** Component `index` (from 0) at `x` within the step just accepted. */
-  (index: number, x: number): number
-}
+/** Component `index` (from 0) at `x` within the step just accepted. */
+export type DenseOutput = (index: number, x: number) => number
 
 export declare class Solver {
   constructor(dimension: number)

@@ -15,7 +15,7 @@ const repetitions = 9
 const unitRuns = 50
 
 /** Largest time of the record over the bare loop. `odex` follows a stiff amplifier, so this is no small number. */
-const mostRecordUnits = 3000
+const mostRecordUnits = 1200
 /** Largest time of the poles over the bare loop. */
 const mostPolesUnits = 1
 /** Memory that a record may keep, over the size of its three columns. */

@@ -92,7 +92,7 @@ export function CircuitDrawing(props: CircuitDrawingProps) {
         <NetworkArm />
         <GainArm control={control} />
         <AmplifierSymbol limit={limiting} />
-        <Output loaded={loaded} />
+        <Output loaded={loaded} single={reference !== null} />
         <Feet reference={reference} />
       </svg>
       {slots.map(([slot, content]) =>
@@ -132,9 +132,9 @@ function GainArm({ control }: Pick<CircuitDrawingProps, 'control'>) {
       {control === 'diodes' ? (
         <>
           <Resistor x={x} y={100} along={20} />
-          <path d={`M${x} 138H200V226H${x}M219 138V226`} />
-          <Diode x={200} y={176} />
-          <Diode x={219} y={190} up />
+          <path d={`M${x} 138H201V226H${x}M219 138V226`} />
+          <Diode x={201} y={164} />
+          <Diode x={219} y={184} up />
           <Resistor x={x} y={182} along={20} />
           <Joint x={x} y={138} />
           <Joint x={x} y={226} />
@@ -178,14 +178,19 @@ function AmplifierSymbol({ limit }: { limit: Exclude<Mode, 'linear'> | null }) {
   )
 }
 
-function Output({ loaded }: { loaded: boolean }) {
+/** The load ends where both arms do: at earth, or at the reference of a single supply. */
+function Output({ loaded, single }: { loaded: boolean; single: boolean }) {
   const x = at.amplifier
   return (
     <>
       <path d={`M${x} ${row.output}V31`} className="stroke-petrol" />
       {loaded && (
         <>
-          <path d={`M${x + 4} 27H240V42M233 42h14M236 46h8M238.5 50h3`} />
+          <path d={`M${x + 4} 27H240V42`} />
+          <path
+            d={single ? 'M231 42h18' : 'M233 42h14M236 46h8M238.5 50h3'}
+            strokeWidth={single ? 2.4 : undefined}
+          />
           <LyingResistor x={209} y={27} />
         </>
       )}

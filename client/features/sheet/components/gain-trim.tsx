@@ -12,6 +12,9 @@ const positions = 1000
 /** Feedback R is set to this many significant digits, as a trimmer and a meter can. */
 const digits = 5
 
+/** The least share of the travel that two zone names need to stand side by side. */
+const roomForTwo = 0.35
+
 const share = (value: number, { least, greatest }: TrimRange) =>
   Math.min(1, Math.max(0, (value - least) / (greatest - least)))
 
@@ -31,6 +34,12 @@ function zones(range: TrimRange): Zone[] {
     { from: mild, to: 1, name: 'clips hard', className: 'bg-warn-wash' },
   ].filter((zone) => zone.to > zone.from)
 }
+
+/** Zones whose names fit: the middle one's is left out where the last two would meet. */
+const namedZones = (range: TrimRange) =>
+  zones(range).filter(
+    (zone, index, all) => index === 0 || index === all.length - 1 || 1 - zone.from >= roomForTwo,
+  )
 
 /** @param linear of the present circuit; null while there is none */
 export function GainTrim({ linear }: { linear: SmallSignal | null }) {
@@ -95,7 +104,7 @@ export function GainTrim({ linear }: { linear: SmallSignal | null }) {
           </Slider.Thumb>
         </Slider.Root>
         <div className="relative h-4 text-xs text-soft">
-          {zones(range).map((zone, index, all) => (
+          {namedZones(range).map((zone, index, all) => (
             <span
               key={zone.name}
               className="absolute top-0 whitespace-nowrap"

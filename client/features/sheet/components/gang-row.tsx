@@ -40,8 +40,8 @@ export function GangRow() {
           'Editing one arm sets the other. '
         ) : (
           <>
-            Mismatch, shunt against series: R <b className="text-ink">{apart(r)}</b>, C{' '}
-            <b className="text-ink">{apart(c)}</b>.{' '}
+            Mismatch, shunt against series: R <b className="whitespace-nowrap text-ink">{apart(r)}</b>, C{' '}
+            <b className="whitespace-nowrap text-ink">{apart(c)}</b>.{' '}
           </>
         )}
         Arrow keys step along {content.series}, with Shift finely.

@@ -6,11 +6,19 @@ import { useEditing } from '#client/features/sheet/editing-context.ts'
 import { isSingle, withSupplyKind } from '#client/features/sheet/supply.ts'
 import { formatQuantity } from '#shared/units/format.ts'
 
+function Reach({ sign, rail, headroom }: { sign: string; rail: number; headroom: number }) {
+  return (
+    <span className="whitespace-nowrap">
+      {sign}
+      {formatQuantity(rail - headroom, 'V', { digits: 3 })}
+    </span>
+  )
+}
+
 export function SupplySection() {
   const { content, readOnly, edit } = useEditing()
   const { supply, amplifier } = content.circuit
   const single = isSingle(supply)
-  const reach = (rail: number, headroom: number) => formatQuantity(rail - headroom, 'V', { digits: 3 })
   return (
     <CardSection title="Supply">
       <Choice
@@ -41,8 +49,8 @@ export function SupplySection() {
       <p className="text-sm text-soft">
         {single &&
           'The reference counts from the negative rail; its own impedance is not modelled. Volts are from the reference. '}
-        The output reaches from −{reach(supply.negative, amplifier.headroomLow)} to +
-        {reach(supply.positive, amplifier.headroomHigh)}.
+        The output reaches from <Reach sign="−" rail={supply.negative} headroom={amplifier.headroomLow} /> to{' '}
+        <Reach sign="+" rail={supply.positive} headroom={amplifier.headroomHigh} />.
       </p>
     </CardSection>
   )

@@ -1,21 +1,9 @@
 /** Every page by axe-core (WCAG 2.2 A and AA), in both themes, on a desk and on a phone, and no sideways scrolling. */
-import type { Browser } from 'playwright-core'
-import { afterAll, beforeAll, describe, expect, it } from 'vitest'
-import { accessibilityFindings, launchBrowser, openPage, signIn } from '#tests/support/browser.ts'
-import { serveApp, type ServedApp } from '#tests/support/served-app.ts'
+import { describe, expect, it } from 'vitest'
+import { accessibilityFindings } from '#tests/support/browser.ts'
+import { serveForTests } from '#tests/support/e2e.ts'
 
-let app: ServedApp
-let browser: Browser
-
-beforeAll(async () => {
-  app = await serveApp()
-  browser = await launchBrowser()
-})
-
-afterAll(async () => {
-  await browser?.close()
-  await app?.remove()
-})
+const { openStranger, openAs } = serveForTests()
 
 /** Address and the text that shows that the page has its content. */
 const pages: [path: string, ready: string | RegExp][] = [
@@ -37,7 +25,7 @@ const settings = [
 
 describe.each(settings)('at $width px, $colorScheme', ({ width, colorScheme }) => {
   it('finds nothing on the sign-in page', async () => {
-    const { page, context } = await openPage(browser, app.url, { width, colorScheme })
+    const { page, context } = await openStranger({ width, colorScheme })
     await page.goto('/sign-in')
     await page.getByRole('button', { name: 'Sign in' }).waitFor()
     expect(await accessibilityFindings(page)).toEqual([])
@@ -45,8 +33,7 @@ describe.each(settings)('at $width px, $colorScheme', ({ width, colorScheme }) =
   })
 
   it('finds nothing on the pages behind it', async () => {
-    const { page, context, errors } = await openPage(browser, app.url, { width, colorScheme })
-    await signIn(page, 'engineer')
+    const { page, context, errors } = await openAs('engineer', undefined, { width, colorScheme })
     const findings: string[] = []
     for (const [path, ready] of pages) {
       await page.goto(path)

@@ -1,48 +1,27 @@
 /** The sheet while somebody works on it: a moving slider, a dense record, zoom and cursors, undo. */
-import type { Browser, Page } from 'playwright-core'
-import { afterAll, beforeAll, describe, expect, it } from 'vitest'
-import { launchBrowser, openPage, signIn } from '#tests/support/browser.ts'
-import { serveApp, type ServedApp } from '#tests/support/served-app.ts'
+import type { Page } from 'playwright-core'
+import { beforeAll, describe, expect, it } from 'vitest'
+import { enter, serveForTests, verdictLine } from '#tests/support/e2e.ts'
 
-let app: ServedApp
-let browser: Browser
+const { openAs } = serveForTests()
 let page: Page
 let errors: string[]
 
 beforeAll(async () => {
-  app = await serveApp()
-  browser = await launchBrowser()
-  const opened = await openPage(browser, app.url)
-  page = opened.page
-  errors = opened.errors
-  await signIn(page, 'engineer')
-  await page.goto('/designs/1/start-up')
+  ;({ page, errors } = await openAs('engineer', '/designs/1/start-up'))
   await page.getByText('It starts.').waitFor({ timeout: 60_000 })
 })
 
-afterAll(async () => {
-  await browser?.close()
-  await app?.remove()
-})
-
-const figures = () => page.locator('dl[aria-label="Figures"]').innerText()
-
-async function enter(label: string, text: string) {
-  const field = page.getByLabel(label, { exact: true })
-  await field.fill(text)
-  await field.press('Enter')
-}
-
 describe('the live sheet', () => {
   it('lets every figure follow a moving trim slider', async () => {
-    await expect.poll(figures, { timeout: 30_000 }).toMatch(/Level\n7\.5\s*V/)
+    await expect.poll(() => verdictLine(page), { timeout: 30_000 }).toMatch(/Level\n7\.5\s*V/)
     const seen = new Set<string>()
     const slider = page.getByRole('slider', { name: /Gain trim/ })
     await slider.focus()
     for (let step = 0; step < 12; step++) {
       await slider.press('ArrowLeft')
       await page.waitForTimeout(150)
-      seen.add(await figures())
+      seen.add(await verdictLine(page))
     }
     // Not only the last position is shown: the figures changed on the way.
     expect(seen.size).toBeGreaterThan(4)
@@ -60,8 +39,8 @@ describe('the live sheet', () => {
       }
       requestAnimationFrame(count)
     })
-    await enter('Duration', '60 ms')
-    await enter('Sample interval', '2u')
+    await enter(page, 'Duration', '60 ms')
+    await enter(page, 'Sample interval', '2u')
     await page.getByText(/30,001 samples/).waitFor({ timeout: 60_000 })
     const frames = await page.evaluate(() => (window as unknown as { frames: number }).frames)
     expect(frames).toBeGreaterThan(5)
@@ -95,7 +74,7 @@ describe('the live sheet', () => {
   })
 
   it('undoes and redoes from the keyboard', async () => {
-    await enter('ground R', '9k1')
+    await enter(page, 'ground R', '9k1')
     await page.getByLabel('ground R', { exact: true }).blur()
     await page.keyboard.press('Control+z')
     await expect.poll(() => page.getByLabel('ground R', { exact: true }).inputValue()).toBe('10k')

@@ -1,43 +1,20 @@
 /** The whole job in a real browser: an engineer proves a design and saves the run, a reviewer replays it. */
-import type { Browser, Page } from 'playwright-core'
-import { afterAll, beforeAll, describe, expect, it } from 'vitest'
-import { launchBrowser, openPage, signIn } from '#tests/support/browser.ts'
-import { serveApp, type ServedApp } from '#tests/support/served-app.ts'
+import type { Page } from 'playwright-core'
+import { describe, expect, it } from 'vitest'
+import { enter, serveForTests, verdictLine } from '#tests/support/e2e.ts'
 
-let app: ServedApp
-let browser: Browser
-
-beforeAll(async () => {
-  app = await serveApp()
-  browser = await launchBrowser()
-})
-
-afterAll(async () => {
-  await browser?.close()
-  await app?.remove()
-})
-
-/** Types into a labelled field and leaves it, as a person does. */
-async function enter(page: Page, label: string, text: string) {
-  const field = page.getByLabel(label, { exact: true })
-  await field.fill(text)
-  await field.press('Enter')
-}
+const { openAs } = serveForTests()
 
 /** A figure of the verdict line as shown, number only. */
 async function figure(page: Page, name: string): Promise<string> {
-  const line = page.locator('dl[aria-label="Figures"]')
-  return line.innerText().then((text) => {
-    const rows = text.split('\n').map((row) => row.trim())
-    return rows[rows.indexOf(name) + 1] ?? ''
-  })
+  const rows = (await verdictLine(page)).split('\n').map((row) => row.trim())
+  return rows[rows.indexOf(name) + 1] ?? ''
 }
 
 describe('from power-on to a replayed run', () => {
   it('lets an engineer make a design, prove it and save the run, and a reviewer replay it', async () => {
-    const engineer = await openPage(browser, app.url)
+    const engineer = await openAs('engineer')
     const { page } = engineer
-    await signIn(page, 'engineer')
 
     await page.getByRole('button', { name: 'New design' }).click()
     const dialog = page.getByRole('dialog')
@@ -76,9 +53,7 @@ describe('from power-on to a replayed run', () => {
     const runAddress = page.url()
     expect(engineer.errors).toEqual([])
 
-    const reviewer = await openPage(browser, app.url)
-    await signIn(reviewer.page, 'reviewer')
-    await reviewer.page.goto(runAddress)
+    const reviewer = await openAs('reviewer', runAddress)
     await reviewer.page.getByText('68 k over 33 k, as built.').waitFor()
     await reviewer.page.getByRole('button', { name: 'Replay' }).click()
     await reviewer.page.getByText('It replays.').waitFor({ timeout: 60_000 })

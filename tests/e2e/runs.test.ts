@@ -1,30 +1,11 @@
 /** Saved runs in a browser: list, compare, step through the limits, export, delete. */
 import { readFile } from 'node:fs/promises'
 import Papa from 'papaparse'
-import type { Browser, Page } from 'playwright-core'
-import { afterAll, beforeAll, describe, expect, it } from 'vitest'
-import { launchBrowser, openPage, signIn } from '#tests/support/browser.ts'
-import { serveApp, type ServedApp } from '#tests/support/served-app.ts'
+import type { Page } from 'playwright-core'
+import { describe, expect, it } from 'vitest'
+import { serveForTests } from '#tests/support/e2e.ts'
 
-let app: ServedApp
-let browser: Browser
-
-beforeAll(async () => {
-  app = await serveApp()
-  browser = await launchBrowser()
-})
-
-afterAll(async () => {
-  await browser?.close()
-  await app?.remove()
-})
-
-async function open(path: string) {
-  const opened = await openPage(browser, app.url)
-  await signIn(opened.page, 'engineer')
-  await opened.page.goto(path)
-  return opened
-}
+const { openAs } = serveForTests()
 
 /** The run of the bare exciter that clips: its title in the demo. */
 const clipping = 'Power-on as drawn'
@@ -36,7 +17,7 @@ async function openRun(page: Page, title: string) {
 
 describe('saved runs', () => {
   it('steps the playhead through the limits and shows each on the circuit', async () => {
-    const { page, errors, context } = await open('/runs')
+    const { page, errors, context } = await openAs('engineer', '/runs')
     await openRun(page, clipping)
     const bar = page.getByRole('group', { name: 'Playhead' })
     await bar.getByText('No limit is active').first().waitFor()
@@ -61,7 +42,7 @@ describe('saved runs', () => {
   })
 
   it('compares two runs in one plot, with their figures and inputs side by side', async () => {
-    const { page, errors, context } = await open('/runs?search=exciter')
+    const { page, errors, context } = await openAs('engineer', '/runs?search=exciter')
     const boxes = page.getByRole('checkbox', { name: /^Compare / })
     await boxes.nth(0).check()
     await boxes.nth(1).check()
@@ -77,7 +58,7 @@ describe('saved runs', () => {
   })
 
   it('exports the record as CSV with units', async () => {
-    const { page, context } = await open('/runs')
+    const { page, context } = await openAs('engineer', '/runs')
     await openRun(page, clipping)
     const [download] = await Promise.all([
       page.waitForEvent('download'),
@@ -99,7 +80,7 @@ describe('saved runs', () => {
   })
 
   it('deletes an own run after asking, and finds it no more', async () => {
-    const { page, context } = await open('/runs')
+    const { page, context } = await openAs('engineer', '/runs')
     await openRun(page, clipping)
     await page.getByRole('button', { name: 'Delete' }).click()
     await page

@@ -1,35 +1,15 @@
 /** Bad input and bad luck in a real browser: each has a clear message, keeps what was typed, leaves the rest working. */
-import type { Browser, Page } from 'playwright-core'
-import { afterAll, beforeAll, describe, expect, it } from 'vitest'
-import { launchBrowser, openPage, signIn } from '#tests/support/browser.ts'
+import type { Page } from 'playwright-core'
+import { describe, expect, it } from 'vitest'
 import { demoAccounts } from '#server/db/demo/accounts.ts'
-import { serveApp, type ServedApp } from '#tests/support/served-app.ts'
+import { enter, serveForTests } from '#tests/support/e2e.ts'
 
-let app: ServedApp
-let browser: Browser
-
-beforeAll(async () => {
-  app = await serveApp()
-  browser = await launchBrowser()
-})
-
-afterAll(async () => {
-  await browser?.close()
-  await app?.remove()
-})
+const { app, openAs, openStranger } = serveForTests()
 
 async function openSheet(path = '/designs/1/start-up'): Promise<{ page: Page; errors: string[] }> {
-  const opened = await openPage(browser, app.url)
-  await signIn(opened.page, 'engineer')
-  await opened.page.goto(path)
+  const opened = await openAs('engineer', path)
   await opened.page.getByText('It starts.').waitFor({ timeout: 60_000 })
   return opened
-}
-
-async function enter(page: Page, label: string, text: string) {
-  const field = page.getByLabel(label, { exact: true })
-  await field.fill(text)
-  await field.press('Enter')
 }
 
 const saved = (page: Page) => page.getByText(/draft, saved/)
@@ -117,11 +97,11 @@ describe('bad luck on the sheet', () => {
 
   it('keeps an edit made while the server is away and saves it when it is back', async () => {
     const { page } = await openSheet('/designs/4/start-up')
-    await app.stop('SIGKILL')
+    await app().stop('SIGKILL')
     await enter(page, 'shunt C', '22n')
     await page.getByText(/offline: kept in this browser/).waitFor({ timeout: 30_000 })
     await page.getByText('It starts.').waitFor()
-    await app.restart()
+    await app().restart()
     await saved(page).waitFor({ timeout: 30_000 })
     await page.reload()
     await expect.poll(() => page.getByLabel('shunt C', { exact: true }).inputValue()).toBe('22n')
@@ -129,8 +109,7 @@ describe('bad luck on the sheet', () => {
   })
 
   it('says so when the computing worker cannot be had, and computes again when it can', async () => {
-    const { page } = await openPage(browser, app.url)
-    await signIn(page, 'engineer')
+    const { page } = await openAs('engineer')
     await page.route('**/engine.worker*', (route) => route.abort())
     await page.goto('/designs/1/start-up')
     await page
@@ -146,8 +125,7 @@ describe('bad luck on the sheet', () => {
 
 describe('who may do what', () => {
   it('lets a technician read and replay but not edit or save', async () => {
-    const { page, context } = await openPage(browser, app.url)
-    await signIn(page, 'technician')
+    const { page, context } = await openAs('technician')
     expect(await page.getByRole('button', { name: 'New design' }).count()).toBe(0)
     await page.goto('/designs/1/start-up')
     await page.getByText('It starts.').waitFor({ timeout: 60_000 })
@@ -161,7 +139,7 @@ describe('who may do what', () => {
   })
 
   it('sends a stranger to the sign-in page and then on to where he or she wanted to go', async () => {
-    const { page, context } = await openPage(browser, app.url)
+    const { page, context } = await openStranger()
     await page.goto('/runs/1')
     await page.waitForURL('**/sign-in?next=*')
     const account = demoAccounts.find(({ role }) => role === 'technician')!

@@ -14,7 +14,7 @@ beforeAll(async () => {
 
 describe('the live sheet', () => {
   it('lets every figure follow a moving trim slider', async () => {
-    await expect.poll(() => verdictLine(page), { timeout: 30_000 }).toMatch(/Level\n7\.5\s*V/)
+    await expect.poll(() => verdictLine(page), { timeout: 30_000 }).toMatch(/Level, peak\n7\.5\s*V/)
     const seen = new Set<string>()
     const slider = page.getByRole('slider', { name: /Gain trim/ })
     await slider.focus()

@@ -46,7 +46,7 @@ export function verdictFigures({ smallSignal, simulation, stale }: LiveResult): 
     },
     quantity('timeTo90', 's', 3),
     quantity('frequency', 'Hz', 4),
-    { ...quantity('level', 'V', 3), name: 'Level' },
+    { ...quantity('level', 'V', 3), name: 'Level, peak' },
     {
       name: figure('thd').name,
       definitions: [definitionOf('thd')],

@@ -20,6 +20,9 @@ export interface RecordFacts {
 
 const percent = (ratio: number) => formatPercent(ratio, { digits: 2 })
 
+/** The gain margin with the digits of the verdict line, so that both say one thing. */
+const margin = (ratio: number) => formatPercent(Math.abs(ratio), { digits: 3 })
+
 /** A share of the settled time that is worth a word. */
 const noticeable = 1e-4
 
@@ -55,7 +58,10 @@ function growth(linear: SmallSignal): string {
 
 function whenItStarts(linear: SmallSignal, circuit: Circuit, record: RecordFacts | null): Phrase[] {
   const lead: Phrase = { text: 'It starts.', mark: 'good' }
-  const excess = ` The loop exceeds its critical gain by ${percent(linear.gainMargin)}`
+  const excess =
+    linear.gainMargin < 1
+      ? ` The loop exceeds its critical gain by ${margin(linear.gainMargin)}`
+      : ` The gain is ${formatNumber(1 + linear.gainMargin, { digits: 3 })} times the critical gain`
   if (linear.frequency === 0)
     return [
       { text: 'It runs to a rail.', mark: 'bad' },
@@ -76,7 +82,7 @@ function whenItStarts(linear: SmallSignal, circuit: Circuit, record: RecordFacts
   const limit = holder(circuit, figures)
   return [
     lead,
-    { text: `${grows} and reaches its level after ` },
+    { text: `${grows} and reaches 90 % of its level after ` },
     { text: formatQuantity(figures.timeTo90, 's', { digits: 3 }), mark: 'strong' },
     ...(limit
       ? [{ text: '; the ' }, { text: limit.who, mark: 'limit' as const }, { text: ` ${limit.how}.` }]
@@ -92,11 +98,10 @@ function whenItDoesNot(linear: SmallSignal, circuit: Circuit): Phrase[] {
       lead,
       { text: ' No gain sustains this loop with this amplifier: it is too slow for the network.' },
     ]
-  const missing = linear.criticalGain / linear.gain - 1
   const fade = linear.growthRate < 0 ? Math.LN2 / -linear.growthRate : null
   return [
     lead,
-    { text: ` The loop lacks ${percent(missing)} of gain` },
+    { text: ` The loop is ${margin(linear.gainMargin)} short of its critical gain` },
     {
       text:
         fade === null

@@ -54,7 +54,7 @@ export function GainTrim({ linear }: { linear: SmallSignal | null }) {
     )
   const width = range.greatest - range.least
   const position = share(circuit.gain.feedbackR, range) * positions
-  const margin = formatPercent(linear.gainMargin, { digits: 2, signed: true })
+  const margin = formatPercent(linear.gainMargin, { digits: 3, signed: true })
   const set = (next: number) => {
     const feedbackR = Number((range.least + (next / positions) * width).toPrecision(digits))
     edit((before) => withFeedback(before, feedbackR), 'trim')
@@ -63,7 +63,7 @@ export function GainTrim({ linear }: { linear: SmallSignal | null }) {
     <div>
       <Row>
         <span>
-          {formatQuantity(circuit.gain.feedbackR, 'Ω', { digits: 5 })}{' '}
+          {formatQuantity(circuit.gain.feedbackR, 'Ω', { digits })}{' '}
           <b className={linear.starts ? 'font-medium text-ok' : 'font-medium text-bad'}>{margin}</b>
         </span>
       </Row>
@@ -97,7 +97,7 @@ export function GainTrim({ linear }: { linear: SmallSignal | null }) {
           />
           <Slider.Thumb
             aria-label="Gain trim, feedback R"
-            aria-valuetext={`${formatQuantity(circuit.gain.feedbackR, 'Ω')}, gain margin ${margin}`}
+            aria-valuetext={`${formatQuantity(circuit.gain.feedbackR, 'Ω', { digits })}, gain margin ${margin}`}
             className="grid size-8 cursor-grab place-items-center rounded-md active:cursor-grabbing"
           >
             <span className="h-5 w-3 rounded-sm bg-petrol" />

@@ -33,9 +33,9 @@ describe('the answers', () => {
   it('stand in a sentence and six figures', async () => {
     await renderSheet()
     await waitFor(() =>
-      expect(sentence()).toHaveTextContent('reaches its level after 42.6 ms; the rails stop'),
+      expect(sentence()).toHaveTextContent('reaches 90 % of its level after 42.6 ms; the rails stop'),
     )
-    for (const figure of ['Gain margin', 'Time to 90 %', 'Frequency', 'Level', 'THD', 'Held at rails'])
+    for (const figure of ['Gain margin', 'Time to 90 %', 'Frequency', 'Level, peak', 'THD', 'Held at rails'])
       expect(within(line()).getByText(figure)).toBeVisible()
     expect(line()).toHaveTextContent('+1.66%')
     expect(line()).toHaveTextContent('26.9%')

@@ -1,6 +1,7 @@
 import { describe, expect, it } from 'vitest'
 import { cautions } from '#client/features/sheet/cautions.ts'
 import { criticalFeedback, trimRange } from '#client/features/sheet/trim.ts'
+import { verdictFigures } from '#client/features/sheet/verdict-figures.ts'
 import { verdict, verdictText } from '#client/features/sheet/verdict.ts'
 import { withControl } from '#client/features/sheet/amplitude-control.ts'
 import { figureKeys, type Figures } from '#shared/figures.ts'
@@ -27,7 +28,7 @@ describe('verdict', () => {
 
   it('says that it starts, how fast and what stops it', () => {
     expect(say(caseA, { timeTo90: 0.10713, heldHigh: 0.08, heldLow: 0.08 })).toBe(
-      'It starts. The loop exceeds its critical gain by 0.66 %, grows 6.4 % a cycle and reaches its level after 107 ms; the rails stop the growth.',
+      'It starts. The loop exceeds its critical gain by 0.664 %, grows 6.4 % a cycle and reaches 90 % of its level after 107 ms; the rails stop the growth.',
     )
   })
 
@@ -53,16 +54,27 @@ describe('verdict', () => {
 
   it('claims no more than is known without a settled record', () => {
     expect(say(caseA, null)).toBe(
-      'It starts. The loop exceeds its critical gain by 0.66 %, grows 6.4 % a cycle.',
+      'It starts. The loop exceeds its critical gain by 0.664 %, grows 6.4 % a cycle.',
     )
     expect(say(caseA, {})).toContain('and has not settled within the record of 180 ms.')
   })
 
   it('says how much gain is missing and which feedback R would do', () => {
-    // Equal arms: critical gain 3 with an ideal amplifier, so 2.9 lacks 3.4 % and 20 kΩ is critical (any textbook).
+    // Equal arms: critical gain 3 with an ideal amplifier and 3.00007 with this one (see trimRange below), so 2.9 is
+    // 1 − 2.9/3.00007 = 3.336 % short, and 20 kΩ is critical (any textbook).
     expect(say(withFeedbackR(19e3), null)).toBe(
-      'It does not start. The loop lacks 3.5 % of gain, and a disturbance halves every 2.2 ms; feedback R above 20 kΩ would carry it over the critical gain.',
+      'It does not start. The loop is 3.34 % short of its critical gain, and a disturbance halves every 2.2 ms; feedback R above 20 kΩ would carry it over the critical gain.',
     )
+  })
+
+  it('says the margin as the verdict line does, and as a factor once per cents stop meaning anything', () => {
+    const circuit = withFeedbackR(18e3)
+    const live = { smallSignal: smallSignal(circuit), simulation: null, grid: null, stale: false }
+    const shown = verdictFigures({ ...live, failure: null, progress: null })[0]!
+    expect(`${shown.parts!.number} ${shown.parts!.unit}`).toBe('−6.67 %')
+    expect(say(circuit, null)).toContain('The loop is 6.67 % short of its critical gain')
+    // 1 + 22 MΩ/10 kΩ = 2201 over a critical gain of 3.00007 is 734.
+    expect(say(withFeedbackR(22e6), null)).toContain('The gain is 734 times the critical gain')
   })
 
   it('says when the loop leaves for a rail without ringing', () => {

@@ -3,14 +3,9 @@ import type { RunInputs } from '#shared/schemas/simulation.ts'
 
 export const behaviours = { answer: 1, die: 2, throw: 3, hang: 4 }
 
-export default function misbehave({ timing }: RunInputs) {
-  switch (timing.duration) {
-    case behaviours.die:
-      return process.exit(7)
-    case behaviours.throw:
-      throw new TypeError('a defect in the engine')
-    case behaviours.hang:
-      Atomics.wait(new Int32Array(new SharedArrayBuffer(4)), 0, 0)
-  }
+export default function misbehave({ timing: { duration } }: RunInputs) {
+  if (duration === behaviours.die) return process.exit(7)
+  if (duration === behaviours.throw) throw new TypeError('a defect in the engine')
+  if (duration === behaviours.hang) Atomics.wait(new Int32Array(new SharedArrayBuffer(4)), 0, 0)
   return { kind: 'solver', path: [], sentence: 'The odd worker answered.' }
 }

@@ -27,10 +27,16 @@ export function sessionUseCases(context: AppContext) {
       const wait = delay.attempt(email, address)
       if (wait > 0) throw tooManyAttempts(wait)
       const person = await database.models.Person.findOne({ where: { email } })
-      const right = await passwordIsRight(password, person?.passwordHash ?? null)
+      const checked = person?.passwordHash ?? null
+      const right = await passwordIsRight(password, checked)
       if (!right || !person || !mayUse(person, config.mode, address)) throw wrongCredentials()
       delay.succeed(email, address)
-      const started = await database.write((transaction) => sessions.start(person.id, userAgent, transaction))
+      const started = await database.write(async (transaction) => {
+        // Hashing took a while: a password changed or an account closed in the meantime must not open a session.
+        await person.reload({ transaction })
+        if (person.passwordHash !== checked || !mayUse(person, config.mode, address)) throw wrongCredentials()
+        return sessions.start(person.id, userAgent, transaction)
+      })
       return { person, ...started }
     },
 

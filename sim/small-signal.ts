@@ -1,6 +1,6 @@
 /** What the loop does before anything limits it. */
 import type { Circuit } from '#shared/schemas/circuit.ts'
-import { gainPath } from '#sim/circuit/gain-path.ts'
+import { gainPathOf } from '#sim/circuit/gain-path-of.ts'
 import { characteristic, criticalGain, loopOf } from '#sim/circuit/loop-polynomial.ts'
 import { cubicRoots } from '#sim/linalg/cubic.ts'
 import type { Complex, SmallSignal } from '#sim/types.ts'
@@ -16,7 +16,7 @@ function leading(poles: readonly Complex[]): Complex {
  * `criticalGain` is Infinity (and `gainMargin` −1) when no gain sustains the loop with this amplifier.
  */
 export function smallSignal(circuit: Circuit): SmallSignal {
-  const { feedbackR, groundR } = gainPath(circuit).smallSignal
+  const { feedbackR, groundR } = gainPathOf(circuit).smallSignal
   const { seriesR, seriesC, shuntR, shuntC } = circuit.network
   const loop = loopOf(circuit)
   const gain = 1 + feedbackR / groundR

@@ -9,7 +9,8 @@
  *     vo'     = demand, ± the slew rate while slewing, the rail's own slope while held
  */
 import type { Circuit } from '#shared/schemas/circuit.ts'
-import { gainPath, type GainPath } from '#sim/circuit/gain-path.ts'
+import type { GainPath } from '#sim/circuit/gain-path.ts'
+import { gainPathOf } from '#sim/circuit/gain-path-of.ts'
 
 /** Positions in a state vector. */
 export const v1Index = 0
@@ -37,7 +38,7 @@ export class Plant {
 
   constructor(circuit: Circuit) {
     const { network, amplifier, load } = circuit
-    this.path = gainPath(circuit)
+    this.path = gainPathOf(circuit)
     this.dimension = this.path.state ? 4 : 3
     this.slewRate = amplifier.slewRate
     this.unityRate = 2 * Math.PI * amplifier.gainBandwidth

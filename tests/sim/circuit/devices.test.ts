@@ -1,7 +1,7 @@
 import fc from 'fast-check'
 import { describe, expect, it } from 'vitest'
 import { DiodePath } from '#sim/circuit/diodes.ts'
-import { gainPath } from '#sim/circuit/gain-path.ts'
+import { gainPathOf } from '#sim/circuit/gain-path-of.ts'
 import { diodes, makeCircuit, quickLamp } from '#tests/sim/support/circuits.ts'
 
 const pair = diodes as Extract<typeof diodes, { kind: 'diodes' }>
@@ -34,7 +34,7 @@ describe.each([
   ['diodes', makeCircuit({ amplitudeControl: diodes }), 0],
   ['a lamp', makeCircuit({ gain: { feedbackR: 430, groundR: 150 }, amplitudeControl: quickLamp }), 380],
 ])('the gain path of %s', (_name, circuit, device) => {
-  const path = gainPath(circuit)
+  const path = gainPathOf(circuit)
 
   it('states the rate of the inverting input as its difference quotient has it', () => {
     for (const vo of [-6, -0.4, 0.02, 1, 7]) {
@@ -60,7 +60,7 @@ describe('the lamp', () => {
       gain: { feedbackR: 430, groundR: 150 },
       amplitudeControl: { ...quickLamp, kind: 'lamp', radiation: 1e-15 } as typeof quickLamp,
     })
-    const path = gainPath(circuit)
+    const path = gainPathOf(circuit)
     const temperature = 420
     const lost = 8e-5 * (temperature - 300) + 1e-15 * (temperature ** 4 - 300 ** 4)
     const resistance = 150 * (temperature / 300) ** 1.2

@@ -1,19 +1,40 @@
-import { SequelizeStorage, Umzug } from 'umzug'
-import type { Sequelize } from 'sequelize'
+import { QueryTypes, type Sequelize, type Transaction } from 'sequelize'
+import { Umzug, type UmzugStorage } from 'umzug'
 import { migrations } from '#server/db/migrations/index.ts'
 
-/** Applies and reverts the schema changes of `migrations/`, each in a transaction; remembers them in `migrations`. */
+/**
+ * Applies and reverts the schema changes of `migrations/`. Each stands in one IMMEDIATE transaction together with the
+ * note that it was applied, in the table `migrations`: a process that is killed leaves both or neither, and of two
+ * that start at once the second finds the work done.
+ */
 export function createMigrator(sequelize: Sequelize) {
-  const run = (statements: readonly string[]) =>
+  async function applied(transaction?: Transaction): Promise<string[]> {
+    const table = 'CREATE TABLE IF NOT EXISTS migrations (name VARCHAR(255) NOT NULL PRIMARY KEY)'
+    await sequelize.query(table, { transaction })
+    const sql = 'SELECT name FROM migrations ORDER BY name'
+    const rows = await sequelize.query<{ name: string }>(sql, { type: QueryTypes.SELECT, transaction })
+    return rows.map(({ name }) => name)
+  }
+
+  /** Runs `statements` and `note` unless another process has brought `name` to the wanted state already. */
+  const run = (name: string, wanted: boolean, statements: readonly string[], note: string) =>
     sequelize.transaction(async (transaction) => {
+      if ((await applied(transaction)).includes(name) === wanted) return
       for (const statement of statements) await sequelize.query(statement, { transaction })
+      await sequelize.query(note, { transaction, replacements: [name] })
     })
-  const storage = new SequelizeStorage({ sequelize, modelName: 'migration', tableName: 'migrations' })
+
+  const storage: UmzugStorage = {
+    executed: () => applied(),
+    // Noted with the change itself, above.
+    logMigration: () => Promise.resolve(),
+    unlogMigration: () => Promise.resolve(),
+  }
   const migrator = new Umzug({
     migrations: migrations.map(({ name, up, down }) => ({
       name,
-      up: () => run(up),
-      down: () => run(down),
+      up: () => run(name, true, up, 'INSERT INTO migrations (name) VALUES (?)'),
+      down: () => run(name, false, down, 'DELETE FROM migrations WHERE name = ?'),
     })),
     storage,
     logger: undefined,
@@ -21,6 +42,6 @@ export function createMigrator(sequelize: Sequelize) {
   return {
     migrator,
     /** Names of all that were applied to this database, by whatever version. */
-    applied: () => storage.executed(),
+    applied: () => applied(),
   }
 }

@@ -1,9 +1,10 @@
+import { join } from 'node:path'
 import { afterEach, beforeEach, describe, expect, it } from 'vitest'
 import { openDatabase } from '#server/db/database.ts'
 import { createMigrator } from '#server/db/migrator.ts'
 import { migrations } from '#server/db/migrations/index.ts'
 import { createTestClock } from '#tests/support/clock.ts'
-import { createTestDatabase } from '#tests/support/database.ts'
+import { createTestDatabase, temporaryFolder } from '#tests/support/database.ts'
 import { createFactories } from '#tests/support/factories.ts'
 
 let test: Awaited<ReturnType<typeof createTestDatabase>>
@@ -50,6 +51,49 @@ describe('the migrations', () => {
       expect(reverted?.name).toBe(name)
     }
     expect(await schema()).toEqual([])
+  })
+
+  it('leave nothing behind when one fails halfway, and go on from there', async () => {
+    const { sequelize } = test.database
+    const { migrator, applied } = createMigrator(sequelize)
+    await migrator.down()
+    const before = await schema()
+    // The last step makes two tables; a view of the second one's name stops it after the first.
+    await sequelize.query('CREATE VIEW run_records AS SELECT 1')
+    await expect(migrator.up()).rejects.toThrow('run_records already exists')
+    await sequelize.query('DROP VIEW run_records')
+    expect(await schema()).toEqual(before)
+    expect(await applied()).toEqual(migrations.slice(0, -1).map(({ name }) => name))
+    await migrator.up()
+    expect(await applied()).toEqual(migrations.map(({ name }) => name))
+  })
+
+  it('are noted together with the change: what cannot be noted is not changed either', async () => {
+    const { sequelize } = test.database
+    const { migrator } = createMigrator(sequelize)
+    await migrator.down()
+    const before = await schema()
+    await sequelize.query(
+      "CREATE TRIGGER no_note BEFORE INSERT ON migrations BEGIN SELECT RAISE(ABORT, 'no note'); END",
+    )
+    await expect(migrator.up()).rejects.toThrow('no note')
+    expect(await schema()).toEqual(before)
+    await sequelize.query('DROP TRIGGER no_note')
+    await migrator.up()
+    expect(await migrator.pending()).toEqual([])
+  })
+
+  it('are applied once when several processes start at once', async () => {
+    const folder = await temporaryFolder()
+    const file = join(folder.path, 'new.sqlite')
+    const opened = await Promise.all([1, 2, 3].map(() => openDatabase(file)))
+    try {
+      for (const { sequelize } of opened)
+        expect(await createMigrator(sequelize).applied()).toHaveLength(migrations.length)
+    } finally {
+      await Promise.all(opened.map((database) => database.close()))
+      await folder.remove()
+    }
   })
 
   it('match the models: every model writes and reads a row', async () => {

@@ -9,7 +9,7 @@ import { keepSession } from '#client/lib/api.ts'
 import { safeNext } from '#client/lib/next-path.ts'
 
 /** The door. Nothing of whoever was here before stays in memory; after it comes the page that was asked for. */
-export function SignInPage() {
+export function SignInPage({ demo }: { demo: boolean }) {
   const [search] = useSearchParams()
   const navigate = useNavigate()
   const queryClient = useQueryClient()
@@ -32,7 +32,7 @@ export function SignInPage() {
       </Card>
       <div className="mt-5 text-center text-sm text-soft *:text-balance">
         <p>Design, prove and sign off RC sine-wave oscillators.</p>
-        <p>In a demo, the sign-ins are printed where the server was started.</p>
+        {demo && <p>This is a demo: its sign-ins are printed where the server was started.</p>}
       </div>
     </main>
   )

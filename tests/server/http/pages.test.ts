@@ -86,6 +86,7 @@ describe('every answer', () => {
     const secure = await startTestServer({ config: { mode: 'production', trustProxy: 1 } })
     try {
       const answer = await request(secure.url).get('/api/health')
+      expect(answer.body).toMatchObject({ status: 'ok', mode: 'production' })
       expect(answer.get('Strict-Transport-Security')).toMatch(/^max-age=\d{8}/)
       expect(answer.get('Content-Security-Policy')).toContain('upgrade-insecure-requests')
     } finally {
@@ -94,7 +95,9 @@ describe('every answer', () => {
   })
 
   it('of the API stays out of caches', async () => {
-    expect((await get('/api/health')).get('Cache-Control')).toBe('no-store')
+    const answer = await get('/api/health')
+    expect(answer.get('Cache-Control')).toBe('no-store')
+    expect(answer.body).toMatchObject({ status: 'ok', mode: 'demo' })
   })
 })
 

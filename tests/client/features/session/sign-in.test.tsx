@@ -44,6 +44,13 @@ describe('sign-in', () => {
     expect(at()).toBe('/designs?search=kHz')
   })
 
+  it.each(['demo', 'production'] as const)('says where the sign-ins are in a demo only: %s', async (mode) => {
+    closedServer().set('GET /api/health', answer({ status: 'ok', version: '1', database: 'ok', mode }))
+    renderApp('/sign-in')
+    await screen.findByLabelText('E-mail')
+    expect(screen.queryByText(/sign-ins are printed/) !== null).toBe(mode === 'demo')
+  })
+
   it('does not lead to another site', async () => {
     closedServer()
     const { at, user } = renderApp('/sign-in?next=//elsewhere.example/')

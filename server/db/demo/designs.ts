@@ -16,9 +16,9 @@ export interface DemoDesign {
 
 /** Three projects, each named as what it is. */
 export const demoProjects = {
-  cell: 'River cell exciter (invented demo data)',
-  calibrator: 'Bench calibrator (invented demo data)',
-  tracer: 'Cable tracer (invented demo data)',
+  cell: 'River cell exciter (invented)',
+  calibrator: 'Bench calibrator (invented)',
+  tracer: 'Cable tracer (invented)',
 } as const
 
 const mara = 'mara@brackwater.example'

@@ -70,7 +70,7 @@ describe('the demo', () => {
     expect(designs).toHaveLength(6)
     for (const { draft, project } of designs) {
       expect(draftContentSchema.safeParse(draft.content).error).toBeUndefined()
-      expect(project.name).toContain('(invented demo data)')
+      expect(project.name).toContain('(invented)')
     }
   })
 

@@ -3,6 +3,7 @@ import { useMemo, useState } from 'react'
 import type { Cursors, LimitSpan, View } from '#client/components/charts/chart-types.ts'
 import { CursorTable } from '#client/components/charts/cursor-table.tsx'
 import { OverviewStrip } from '#client/components/charts/overview-strip.tsx'
+import { PlotHints } from '#client/components/charts/plot-hints.tsx'
 import { PlotCard, type KeyItem } from '#client/components/charts/plot-card.tsx'
 import { waveformTable } from '#client/components/charts/plot-table.ts'
 import { saveText, spanCsv } from '#client/components/charts/span-csv.ts'
@@ -30,7 +31,6 @@ export function OutputPlot({ simulation, spans, ...rest }: OutputPlotProps) {
   const series = useMemo(() => startUpSeries(simulation, choice), [simulation, choice])
   const overview = useMemo(() => startUpSeries(simulation, { node: false, control: false }), [simulation])
   const whole = wholeView(overview, sampleInterval)
-  const isWhole = view[0] === whole[0] && view[1] === whole[1]
   const timeTo90 = figures?.timeTo90 ?? null
   const marks = useMemo(
     () =>
@@ -88,15 +88,7 @@ export function OutputPlot({ simulation, spans, ...rest }: OutputPlotProps) {
             onChange={(event) => setChoice({ ...choice, control: event.target.checked })}
           />
         )}
-        <span className="ml-auto pointer-coarse:hidden">
-          Drag to zoom, click to place a cursor, Shift-drag to move.
-        </span>
-        <span className="ml-auto hidden pointer-coarse:inline">
-          Drag to move, tap to place a cursor, drag the strip’s edges to zoom.
-        </span>
-        <Button variant="quiet" disabled={isWhole} onClick={() => onViewChange(whole)}>
-          Whole record
-        </Button>
+        <PlotHints view={view} end={whole[1]} onViewChange={onViewChange} />
       </div>
     </PlotCard>
   )

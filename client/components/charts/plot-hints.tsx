@@ -12,7 +12,10 @@ export interface PlotHintsProps {
 export function PlotHints({ view, end, onViewChange }: PlotHintsProps) {
   const isWhole = view[0] <= 0 && view[1] >= end
   return (
-    <div className="flex flex-wrap items-center justify-end gap-x-4 px-2 pt-1.5 text-sm text-soft">
+    <div
+      data-print="hidden"
+      className="ml-auto flex flex-wrap items-center justify-end gap-x-4 text-sm text-soft"
+    >
       <span className="pointer-coarse:hidden">
         Drag to zoom, click to place a cursor, Shift-drag to move.
       </span>

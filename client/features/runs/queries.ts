@@ -40,6 +40,20 @@ export const runQueries = {
     }),
 }
 
+/** The lists of runs, and those of designs, which count their runs. */
+const refreshLists = (client: QueryClient) =>
+  Promise.all([
+    client.invalidateQueries({ queryKey: runQueries.lists() }),
+    client.invalidateQueries({ queryKey: ['designs', 'list'] }),
+  ])
+
+/** A page of the list once the run is gone. */
+function without(page: Page<RunSummary> | undefined, id: number): Page<RunSummary> | undefined {
+  const items = page?.items.filter((run) => run.id !== id)
+  if (!page || !items || items.length === page.items.length) return page
+  return { ...page, items, total: page.total - 1 }
+}
+
 export const runMutations = {
   save: (client: QueryClient) =>
     mutationOptions({
@@ -47,13 +61,17 @@ export const runMutations = {
         api.post<Run>('/runs', body, { signal }),
       onSuccess: async (run) => {
         client.setQueryData(runQueries.detail(run.id).queryKey, run)
-        await client.invalidateQueries({ queryKey: runQueries.lists() })
+        await refreshLists(client)
       },
     }),
   remove: (client: QueryClient) =>
     mutationOptions({
       mutationFn: (id: number) => api.delete<void>(`/runs/${id}`),
-      onSuccess: () => client.invalidateQueries({ queryKey: runQueries.lists() }),
+      onSuccess: (_nothing, id) => {
+        // The list that is shown next says so at once, and asks again.
+        client.setQueriesData<Page<RunSummary>>({ queryKey: runQueries.lists() }, (page) => without(page, id))
+        return refreshLists(client)
+      },
     }),
 }
 

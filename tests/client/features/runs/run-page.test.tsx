@@ -2,6 +2,7 @@ import { act, screen, within } from '@testing-library/react'
 import userEvent from '@testing-library/user-event'
 import { afterEach, describe, expect, it, vi } from 'vitest'
 import type { EngineClient, RecordResult } from '#client/lib/engine-context.ts'
+import { runQueries } from '#client/features/runs/queries.ts'
 import { RunPage } from '#client/features/runs/run-page.tsx'
 import { encodeColumns } from '#shared/record-codec.ts'
 import type { Person } from '#shared/schemas/account.ts'
@@ -68,11 +69,20 @@ describe('RunPage', () => {
 
   it('deletes after a question and goes to the list', async () => {
     const server = serve({ ...stored(), 'DELETE /api/runs/7': new Response(null, { status: 204 }) })
-    const { router } = renderRuns(<RunPage runId={7} />, { viewer: engineer })
+    const { router, queryClient } = renderRuns(<RunPage runId={7} />, { viewer: engineer })
+    const list = runQueries.list({ page: 1 }).queryKey
+    const designs = ['designs', 'list', {}]
+    const kept = makeRun({ id: 8 })
+    queryClient.setQueryData(list, { items: [run, kept], page: 1, pageSize: 25, total: 2 })
+    queryClient.setQueryData(designs, [])
     await userEvent.click(await screen.findByRole('button', { name: 'Delete' }))
     expect(server).not.toHaveBeenCalledWith('/api/runs/7', expect.objectContaining({ method: 'DELETE' }))
     await userEvent.click(screen.getByRole('button', { name: 'Delete run' }))
     await vi.waitFor(() => expect(router.state.location.pathname).toBe('/runs'))
+    // The list shown next no longer has it, and both lists that told of it ask again.
+    expect(queryClient.getQueryData(list)).toMatchObject({ items: [kept], total: 1 })
+    expect(queryClient.getQueryState(list)?.isInvalidated).toBe(true)
+    expect(queryClient.getQueryState(designs)?.isInvalidated).toBe(true)
   })
 
   it('stays with a reason when deletion is refused', async () => {

@@ -1,48 +1,28 @@
 import { useQuery } from '@tanstack/react-query'
-import { useEffect, useRef, useState } from 'react'
 import { Field } from '#client/components/ui/field.tsx'
 import { Select } from '#client/components/ui/select.tsx'
 import { TextInput } from '#client/components/ui/text-input.tsx'
+import { RenameProject } from '#client/features/designs/components/rename-project.tsx'
 import { projectQueries } from '#client/features/designs/queries.ts'
-import { useDebounced } from '#client/lib/use-debounced.ts'
+import { useIncludesRole } from '#client/lib/session.ts'
+import { useSearchText } from '#client/lib/use-search-text.ts'
 import { limits } from '#shared/limits.ts'
 import type { ListDesigns } from '#shared/schemas/design.ts'
-
-const searchRest = 300
 
 export interface FiltersProps {
   params: ListDesigns
   change: (part: Partial<ListDesigns>) => void
 }
 
-/** The search as it is typed; the address follows once typing rests, and typing follows the address (back, links). */
-function useSearchText({ params, change }: FiltersProps) {
-  const [text, setText] = useState(params.search)
-  const rested = useDebounced(text, searchRest)
-  const stated = useRef(params.search)
-  useEffect(() => {
-    const wanted = rested.trim()
-    if (wanted === stated.current) return
-    stated.current = wanted
-    change({ search: wanted })
-    // Only a rest in typing is a reason to search; `change` is new on every draw.
-    // eslint-disable-next-line react-hooks/exhaustive-deps
-  }, [rested])
-  useEffect(() => {
-    if (params.search === stated.current) return
-    stated.current = params.search
-    setText(params.search)
-  }, [params.search])
-  return [text, setText] as const
-}
-
 export function Filters({ params, change }: FiltersProps) {
-  const [text, setText] = useSearchText({ params, change })
+  const [text, setText] = useSearchText(params.search, (search) => change({ search }))
   const projects = useQuery(projectQueries.list())
+  const mayEdit = useIncludesRole('engineer')
+  const project = projects.data?.find(({ id }) => id === params.projectId)
   return (
     <div
       role="search"
-      className="grid grid-cols-2 gap-3 border-b border-line p-4 sm:grid-cols-[minmax(12rem,24rem)_minmax(10rem,16rem)_10rem]"
+      className="grid grid-cols-2 gap-3 border-b border-line p-4 items-end sm:grid-cols-[minmax(12rem,24rem)_minmax(10rem,16rem)_10rem_auto]"
     >
       <Field label="Search" className="max-sm:col-span-2">
         <TextInput
@@ -75,6 +55,7 @@ export function Filters({ params, change }: FiltersProps) {
           <option value="true">Archived</option>
         </Select>
       </Field>
+      {mayEdit && project && <RenameProject key={project.id} project={project} />}
     </div>
   )
 }

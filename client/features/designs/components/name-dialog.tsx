@@ -1,4 +1,4 @@
-/** A dialog that asks for one name: for renaming and for duplicating. */
+/** A dialog that asks for one name: for renaming a design or a project, and for duplicating. */
 import { zodResolver } from '@hookform/resolvers/zod'
 import { useEffect, useId } from 'react'
 import { useForm } from 'react-hook-form'

@@ -1,4 +1,4 @@
-/** Everything the list can do to designs. Each change makes the lists ask again. */
+/** Everything the list can do to designs and projects. Each change makes the lists ask again. */
 import { useMutation, useQueryClient } from '@tanstack/react-query'
 import { designQueries, projectQueries } from '#client/features/designs/queries.ts'
 import { api } from '#client/lib/api.ts'
@@ -32,6 +32,14 @@ export function useChangeDesign(id: number) {
   const refresh = useRefresh()
   return useMutation({
     mutationFn: (change: ChangeDesign) => api.patch<Design>(`/designs/${id}`, change),
+    onSuccess: refresh,
+  })
+}
+
+export function useRenameProject(id: number) {
+  const refresh = useRefresh()
+  return useMutation({
+    mutationFn: (name: string) => api.patch<Project>(`/projects/${id}`, { name }),
     onSuccess: refresh,
   })
 }

@@ -229,6 +229,40 @@ describe('changing designs', () => {
   })
 })
 
+describe('renaming a project', () => {
+  it('is offered to an engineer beside the project that the list is filtered by', async () => {
+    const app = open('/designs')
+    await screen.findByRole('option', { name: 'Calibrator' })
+    expect(screen.queryByRole('button', { name: 'Rename project…' })).not.toBeInTheDocument()
+    await app.user.selectOptions(screen.getByLabelText('Project'), 'Calibrator')
+    await app.user.click(await screen.findByRole('button', { name: 'Rename project…' }))
+    const dialog = within(await screen.findByRole('dialog', { name: 'Rename project' }))
+    const name = dialog.getByLabelText('Name')
+    expect(name).toHaveValue('Calibrator')
+
+    const taken = 'There is already a project of this name.'
+    const errors = [{ path: ['name'], message: taken }]
+    app.server.set('PATCH /api/projects/2', problem(409, 'name-taken', { detail: taken, errors }))
+    await app.user.clear(name)
+    await app.user.type(name, 'Bench tone{Enter}')
+    await waitFor(() => expect(name).toHaveAccessibleDescription(taken))
+
+    app.server.set('PATCH /api/projects/2', answer({ id: 2, name: 'Bench tone', designs: 1 }))
+    app.server.set('GET /api/projects', answer({ items: [{ id: 2, name: 'Bench tone', designs: 1 }] }))
+    await app.user.type(name, '{Enter}')
+    expect(await screen.findByRole('option', { name: 'Bench tone' })).toBeInTheDocument()
+    expect(app.server.asked('PATCH /api/projects/2').at(-1)?.body).toEqual({ name: 'Bench tone' })
+    expect(screen.getByText('The project is now “Bench tone”.')).toBeInTheDocument()
+    await waitFor(() => expect(screen.getByRole('button', { name: 'Rename project…' })).toHaveFocus())
+  })
+
+  it('is not offered to a technician', async () => {
+    open('/designs?projectId=2', { role: 'technician' })
+    await screen.findByRole('option', { name: 'Calibrator' })
+    expect(screen.queryByRole('button', { name: 'Rename project…' })).not.toBeInTheDocument()
+  })
+})
+
 describe('creating a design', () => {
   async function openDialog(app: ReturnType<typeof open>) {
     await app.user.click(await screen.findByRole('button', { name: 'New design' }))

@@ -11,13 +11,18 @@ const secretLength = 32
 
 const portSentence = 'PORT must be a whole number from 0 to 65535.'
 const proxySentence = 'TRUST_PROXY must be the number of proxies in front, 0 to 10.'
+const modeSentence = 'NODE_ENV must be production, development, test or demo, or not be set.'
+
+/** An IPv6 address may be written as in a URL. */
+const withoutBrackets = (host: string) => host.replace(/^\[(.*)\]$/, '$1')
 
 const whole = (error: string, greatest: number) =>
   z.coerce.number({ error }).int({ error }).min(0, { error }).max(greatest, { error })
 
 const environmentSchema = z.object({
-  NODE_ENV: z.string().default('demo'),
-  HOST: z.string().trim().default('127.0.0.1'),
+  // A misspelt "production" must not end in a demo.
+  NODE_ENV: z.enum(['production', 'development', 'test', 'demo'], { error: modeSentence }).default('demo'),
+  HOST: z.string().trim().transform(withoutBrackets).default('127.0.0.1'),
   PORT: whole(portSentence, 65535).default(4173),
   DATABASE_FILE: z.string().trim().default('data/sinewright.sqlite'),
   SESSION_SECRET: z.string().optional(),
@@ -63,6 +68,10 @@ export function readConfig(environment: NodeJS.ProcessEnv): Config {
     throw new StartError(
       `The demo listens on this machine only: HOST must be 127.0.0.1, ::1 or localhost, not ${data.HOST}. Set NODE_ENV=production for a real installation.`,
     )
+  if (mode === 'demo' && data.TRUST_PROXY > 0)
+    throw new StartError(
+      'The demo takes no proxy in front: leave TRUST_PROXY out. Set NODE_ENV=production for a real installation.',
+    )
   const databaseFile = resolve(projectRoot, data.DATABASE_FILE)
   return {
     mode,
@@ -90,17 +99,18 @@ function demoSecret(databaseFile: string): string {
   const file = `${databaseFile}.secret`
   try {
     if (existsSync(file)) {
+      chmodSync(file, 0o600)
       const kept = readFileSync(file, 'utf8').trim()
-      if (kept.length >= secretLength) return kept
+      // Anything else was not made here, or was damaged.
+      if (/^[0-9a-f]{64}$/.test(kept)) return kept
     }
     const secret = randomBytes(32).toString('hex')
     makeFolder(dirname(file))
     writeFileSync(file, `${secret}\n`, { mode: 0o600 })
-    chmodSync(file, 0o600)
     return secret
   } catch (error) {
     throw new StartError(
-      `The folder of the database, ${dirname(file)}, cannot be written (${(error as NodeJS.ErrnoException).code}): choose another DATABASE_FILE.`,
+      `The folder of the database cannot be written (${file}: ${(error as NodeJS.ErrnoException).code}): choose another DATABASE_FILE.`,
     )
   }
 }

@@ -87,9 +87,15 @@ function assertWritable(file: string): void {
 const unwritable = (file: string, code = 'unknown reason') =>
   new StartError(`The database ${file} cannot be written (${code}): choose another DATABASE_FILE.`)
 
+/** SQLite's result code behind an error of Sequelize, or behind one of umzug that wraps it. */
+function resultCode(error: unknown): string | undefined {
+  const { original, cause } = error as { original?: { code?: string }; cause?: unknown }
+  return original?.code ?? (cause instanceof Error ? resultCode(cause) : undefined)
+}
+
 /** SQLite's result codes (https://www.sqlite.org/rescode.html) as sentences; other errors pass unchanged. */
 function asStartError(error: unknown, file: string): unknown {
-  const code = (error as { original?: { code?: string } }).original?.code
+  const code = resultCode(error)
   if (code === 'SQLITE_NOTADB' || code === 'SQLITE_CORRUPT')
     return new StartError(
       `The file ${file} is damaged or no SQLite database: restore it from a backup, or choose another DATABASE_FILE.`,

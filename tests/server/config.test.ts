@@ -1,4 +1,4 @@
-import { existsSync, readFileSync, statSync } from 'node:fs'
+import { chmodSync, existsSync, readFileSync, statSync, writeFileSync } from 'node:fs'
 import { join } from 'node:path'
 import { afterAll, beforeAll, describe, expect, it } from 'vitest'
 import { readConfig } from '#server/config.ts'
@@ -53,6 +53,32 @@ describe('readConfig in demo mode', () => {
     )
   })
 
+  it('makes a new secret when the kept one is damaged, and closes it to others', () => {
+    const { databaseFile, sessionSecret } = demo()
+    const file = `${databaseFile}.secret`
+    // What a file system may leave after a power failure, an empty file, and one that was cut off.
+    for (const damaged of ['\0'.repeat(65), '', sessionSecret.slice(0, 40)]) {
+      writeFileSync(file, damaged)
+      chmodSync(file, 0o644)
+      const renewed = demo().sessionSecret
+      expect(renewed).toMatch(/^[0-9a-f]{64}$/)
+      expect(readFileSync(file, 'utf8').trim()).toBe(renewed)
+      expect(statSync(file).mode & 0o777).toBe(0o600)
+    }
+  })
+
+  it('takes away the right of others to read a secret that is sound', () => {
+    const { databaseFile, sessionSecret } = demo()
+    chmodSync(`${databaseFile}.secret`, 0o644)
+    expect(demo().sessionSecret).toBe(sessionSecret)
+    expect(statSync(`${databaseFile}.secret`).mode & 0o777).toBe(0o600)
+  })
+
+  it('refuses a proxy in front: whose headers it believed could pass for this machine', () => {
+    expect(() => demo({ TRUST_PROXY: '1' })).toThrow('The demo takes no proxy in front')
+    expect(production({ TRUST_PROXY: '1' }).trustProxy).toBe(1)
+  })
+
   it.each(['0.0.0.0', '::', '192.0.2.1', 'sinewright.example', '127.0.0.1.evil.example'])(
     'refuses to listen at %s',
     (HOST) => {
@@ -64,9 +90,13 @@ describe('readConfig in demo mode', () => {
     expect(demo({ HOST }).host).toBe(HOST)
   })
 
+  it('takes an IPv6 address in the brackets of a URL', () => {
+    expect(demo({ HOST: '[::1]' }).host).toBe('::1')
+  })
+
   it('says so when the folder of the database cannot be written', () => {
     expect(() => demo({ DATABASE_FILE: '/proc/nowhere/demo.sqlite' })).toThrow(
-      /^The folder of the database, \/proc\/nowhere, cannot be written \(\w+\)/,
+      /^The folder of the database cannot be written \(\/proc\/nowhere\/demo\.sqlite\.secret: \w+\)/,
     )
   })
 })
@@ -92,6 +122,8 @@ describe('readConfig', () => {
     ['PORT', '65536', 'PORT must be a whole number from 0 to 65535.'],
     ['PORT', '80.5', 'PORT must be a whole number from 0 to 65535.'],
     ['TRUST_PROXY', '-1', 'TRUST_PROXY must be the number of proxies in front, 0 to 10.'],
+    ['NODE_ENV', 'Production', 'NODE_ENV must be production, development, test or demo, or not be set.'],
+    ['NODE_ENV', 'prod', 'NODE_ENV must be production, development, test or demo, or not be set.'],
     ['LOG_LEVEL', 'loud', 'LOG_LEVEL must be one of fatal, error, warn, info, debug, trace, silent.'],
   ])('refuses %s=%s', (name, value, sentence) => {
     expect(() => demo({ [name]: value })).toThrow(sentence)

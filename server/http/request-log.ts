@@ -1,5 +1,5 @@
 import { randomUUID } from 'node:crypto'
-import { pino, type DestinationStream, type Logger } from 'pino'
+import { pino, stdSerializers, type DestinationStream, type LevelWithSilent, type Logger } from 'pino'
 import { pinoHttp } from 'pino-http'
 import type { Config } from '#server/config.ts'
 
@@ -14,13 +14,33 @@ const secrets = [
   'authorization',
 ]
 
+/**
+ * An error as the log keeps it. The database layer's errors carry their statement and the values bound to it, password
+ * hashes and session keys among them: of what an error adds to a plain one only its code is written.
+ */
+function describeError(error: Error) {
+  const { type, message, stack } = stdSerializers.err(error)
+  const { code } = ((error as { original?: object }).original ?? error) as { code?: unknown }
+  return { type, message, stack, ...(code !== undefined && { code }) }
+}
+
 /** The structured log: one JSON object a line, on standard output unless `destination` says otherwise. */
 export function createLog({ logLevel }: Pick<Config, 'logLevel'>, destination?: DestinationStream): Logger {
   const redact = secrets.flatMap((name) => [name, `*.${name}`, `*.*.${name}`])
-  return pino({ level: logLevel, redact }, destination ?? pino.destination(1))
+  return pino(
+    { level: logLevel, redact, serializers: { err: describeError } },
+    destination ?? pino.destination(1),
+  )
 }
 
-/** One line per request: method, path, status, time and who asked. Headers and bodies stay out of the log. */
+/** 503 is the server saying that it has enough to do: worth a look, but no failure. */
+function levelOf(status: number, error?: Error): LevelWithSilent {
+  if (status === 503) return 'warn'
+  if (error || status >= 500) return 'error'
+  return status >= 400 ? 'info' : 'debug'
+}
+
+/** One line per request: method, path, status, time and who asked. Queries, headers and bodies stay out of the log. */
 export function requestLog(log: Logger) {
   return pinoHttp({
     logger: log,
@@ -30,11 +50,14 @@ export function requestLog(log: Logger) {
       return id
     },
     quietReqLogger: true,
-    customLogLevel: (_request, response, error) =>
-      error || response.statusCode >= 500 ? 'error' : response.statusCode >= 400 ? 'info' : 'debug',
+    customLogLevel: (_request, response, error) => levelOf(response.statusCode, error),
     customProps: (request) => ({ personId: (request as Partial<Express.Request>).signedIn?.person.id }),
     serializers: {
-      req: ({ id, method, url }: { id: string; method: string; url: string }) => ({ id, method, url }),
+      req: ({ id, method, url }: { id: string; method: string; url: string }) => ({
+        id,
+        method,
+        path: url.split('?', 1)[0],
+      }),
       res: ({ statusCode }: { statusCode: number }) => ({ statusCode }),
     },
   })

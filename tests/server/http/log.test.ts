@@ -17,7 +17,7 @@ describe('the log', () => {
       .map((text) => JSON.parse(text) as { reqId: string })
       .find(({ reqId }) => reqId === answer.get('X-Request-Id'))
     expect(line).toMatchObject({
-      req: { method: 'GET', url: '/api/designs?search=probe' },
+      req: { method: 'GET', path: '/api/designs' },
       res: { statusCode: 200 },
       responseTime: expect.any(Number),
       personId: engineer.person!.id,
@@ -35,6 +35,41 @@ describe('the log', () => {
     const secrets = [newPassword, testPassword, 'wrong guess', 'another guess', 'forged-token']
     for (const secret of [...secrets, agent.session!.csrfToken, 'sinewright_session', 'eyJ'])
       expect(all).not.toContain(secret)
+  })
+
+  it('holds no query: a form that a browser sends as an address may carry anything', async () => {
+    const engineer = await server.signInAs('engineer')
+    for (const path of ['/sign-in', '/api/session', '/api/designs', '/api/nothing'])
+      await engineer.get(`${path}?password=in-the-address`)
+    expect(server.logged.join('')).not.toContain('in-the-address')
+  })
+
+  it('holds no value of a statement that the database refused', async () => {
+    const agent = await server.signInAs('engineer')
+    const { sequelize, models } = server.context.database
+    const refuse = "CREATE TRIGGER full BEFORE UPDATE ON people BEGIN SELECT RAISE(ABORT, 'no room'); END"
+    await sequelize.query(refuse)
+    try {
+      const before = server.logged.length
+      const body = { currentPassword: testPassword, newPassword: 'never to be stored' }
+      const answer = await agent.put('/api/account/password', body)
+      expect(answer.status).toBe(500)
+      const lines = server.logged.slice(before).join('')
+      expect(lines).toContain('"SQLITE_CONSTRAINT"')
+      // What every bcrypt hash begins with.
+      expect(lines).not.toMatch(/\$2[aby]\$/)
+      const { passwordHash } = (await models.Person.findByPk(agent.person!.id))!
+      expect(passwordHash).toBe(agent.person!.passwordHash)
+    } finally {
+      await sequelize.query('DROP TRIGGER full')
+    }
+  })
+
+  it('tells why an error happened, down to its cause', () => {
+    const lines: string[] = []
+    const log = createLog({ logLevel: 'info' }, { write: (line) => void lines.push(line) })
+    log.error({ err: new Error('the thread failed', { cause: new Error('worker exited with code: 7') }) })
+    expect(lines[0]).toMatch(/the thread failed.*worker exited with code: 7/)
   })
 
   it('strikes out secrets by their name should somebody log them', () => {

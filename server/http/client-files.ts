@@ -1,6 +1,6 @@
 import { existsSync } from 'node:fs'
 import { join } from 'node:path'
-import express, { Router } from 'express'
+import express, { Router, type Request } from 'express'
 import { HttpError, notFound } from '#server/http/errors.ts'
 
 /**
@@ -23,8 +23,7 @@ export function clientFiles(directory: string): Router {
     express.static(directory, { index: false, cacheControl: false, setHeaders: askAnew, redirect: false }),
   )
   router.use((request, response) => {
-    const isPage = request.method === 'GET' && (request.get('Accept') ?? '').includes('text/html')
-    if (!isPage) throw notFound('This file')
+    if (!asksForPage(request)) throw notFound('This file')
     if (!existsSync(index))
       throw new HttpError(404, 'not-found', 'The client is not built. Run "npm run build:client".')
     askAnew(response)
@@ -32,6 +31,12 @@ export function clientFiles(directory: string): Router {
   })
   return router
 }
+
+/** Page addresses hold no dot: a missing script or picture is never answered with the page. */
+const asksForPage = (request: Request) =>
+  (request.method === 'GET' || request.method === 'HEAD') &&
+  !request.path.includes('.') &&
+  request.accepts('html') !== false
 
 const askAnew = (response: { setHeader(name: string, value: string): unknown }) => {
   response.setHeader('Cache-Control', 'no-cache')

@@ -45,7 +45,17 @@ describe('the client', () => {
 
   it('answers 404 for a file that is not there, never the page', async () => {
     for (const path of ['/assets/gone-1234.js', '/gone.svg'])
-      expect((await get(path).set('Accept', '*/*')).status).toBe(404)
+      for (const accept of ['*/*', 'text/html'])
+        expect((await get(path).set('Accept', accept)).status).toBe(404)
+  })
+
+  it('is there for whoever takes anything, and for HEAD', async () => {
+    // What curl and a monitor send (RFC 9110 §12.5.1: no preference stated; §9.3.2).
+    const anything = await get('/designs').set('Accept', '*/*')
+    expect([anything.status, anything.type]).toEqual([200, 'text/html'])
+    const head = await request(server.url).head('/').set('Accept', '*/*')
+    expect([head.status, head.type, head.text]).toEqual([200, 'text/html', undefined])
+    expect((await get('/').set('Accept', 'application/json')).status).toBe(404)
   })
 
   it('does not answer anything else than GET with the page', async () => {

@@ -65,11 +65,17 @@ export function formatQuantity(value: number, unit: string, options?: FormatOpti
   return parts.unit ? `${parts.number}${thinSpace}${parts.unit}` : parts.number
 }
 
-/** A pure ratio in per cent: 0.01375 → `1.375 %`. */
-export function formatPercent(ratio: number, options: FormatOptions = {}): string {
+/** A pure ratio as number of per cent and its sign: 0.01375 → 1.375 and %. */
+export function percentParts(ratio: number, options: FormatOptions = {}): QuantityParts {
   const { digits = 4, signed = false } = options
-  if (!Number.isFinite(ratio)) return '–'
-  return `${withSign(plain(ratio * 100, digits), signed)}${thinSpace}%`
+  if (!Number.isFinite(ratio)) return { number: '–', unit: '' }
+  return { number: withSign(plain(ratio * 100, digits), signed), unit: '%' }
+}
+
+/** A pure ratio in per cent: 0.01375 → `1.375 %`. */
+export function formatPercent(ratio: number, options?: FormatOptions): string {
+  const { number, unit } = percentParts(ratio, options)
+  return unit ? `${number}${thinSpace}${unit}` : number
 }
 
 /** A pure number with a true minus sign. */

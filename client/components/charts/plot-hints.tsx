@@ -3,14 +3,18 @@ import { Button } from '#client/components/ui/button.tsx'
 
 export interface PlotHintsProps {
   view: View
-  /** Last instant of the record, s. */
-  end: number
+  whole: View
+  /** What the button shows again. */
+  wholeName?: string
+  /** Whether an overview strip lies below the plot; fingers zoom there. */
+  strip?: boolean
   onViewChange: (view: View) => void
 }
 
 /** How the plot above is handled, by mouse or by finger, and the way back to the whole record. */
-export function PlotHints({ view, end, onViewChange }: PlotHintsProps) {
-  const isWhole = view[0] <= 0 && view[1] >= end
+export function PlotHints(props: PlotHintsProps) {
+  const { view, whole, wholeName = 'Whole record', strip = true, onViewChange } = props
+  const isWhole = view[0] <= whole[0] && view[1] >= whole[1]
   return (
     <div
       data-print="hidden"
@@ -20,10 +24,12 @@ export function PlotHints({ view, end, onViewChange }: PlotHintsProps) {
         Drag to zoom, click to place a cursor, Shift-drag to move.
       </span>
       <span className="hidden pointer-coarse:inline">
-        Drag to move, tap to place a cursor, drag the strip’s edges to zoom.
+        {strip
+          ? 'Drag to move, tap to place a cursor, drag the strip’s edges to zoom.'
+          : 'Drag to move, tap to place a cursor.'}
       </span>
-      <Button variant="quiet" disabled={isWhole} onClick={() => onViewChange([0, end])}>
-        Whole record
+      <Button variant="quiet" disabled={isWhole} onClick={() => onViewChange(whole)}>
+        {wholeName}
       </Button>
     </div>
   )

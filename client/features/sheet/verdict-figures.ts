@@ -1,7 +1,7 @@
 /** The six figures of the verdict line. */
 import type { LiveResult } from '#client/lib/live-result.ts'
 import { figure, type FigureKey } from '#shared/figures.ts'
-import { formatPercent, quantityParts, thinSpace, type QuantityParts } from '#shared/units/format.ts'
+import { percentParts, quantityParts, type QuantityParts } from '#shared/units/format.ts'
 
 export interface VerdictFigure {
   name: string
@@ -18,10 +18,7 @@ const definitionOf = (key: FigureKey) => {
   return { name, definition }
 }
 
-function percentParts(ratio: number, signed = false): QuantityParts {
-  const [number = '', unit = ''] = formatPercent(ratio, { digits: 3, signed }).split(thinSpace)
-  return { number, unit }
-}
+const digits = 3
 
 export function verdictFigures({ smallSignal, simulation, stale }: LiveResult): VerdictFigure[] {
   const figures = simulation?.figures ?? null
@@ -41,7 +38,7 @@ export function verdictFigures({ smallSignal, simulation, stale }: LiveResult): 
     {
       name: figure('gainMargin').name,
       definitions: [definitionOf('gainMargin'), definitionOf('gain'), definitionOf('criticalGain')],
-      parts: smallSignal && percentParts(smallSignal.gainMargin, true),
+      parts: smallSignal && percentParts(smallSignal.gainMargin, { digits, signed: true }),
       stale: false,
     },
     quantity('timeTo90', 's', 3),
@@ -50,13 +47,13 @@ export function verdictFigures({ smallSignal, simulation, stale }: LiveResult): 
     {
       name: figure('thd').name,
       definitions: [definitionOf('thd')],
-      parts: thd === null ? null : percentParts(thd),
+      parts: thd === null ? null : percentParts(thd, { digits }),
       stale,
     },
     {
       name: 'Held at rails',
       definitions: [definitionOf('heldHigh'), definitionOf('heldLow')],
-      parts: high === null || low === null ? null : percentParts(high + low),
+      parts: high === null || low === null ? null : percentParts(high + low, { digits }),
       stale,
     },
   ]

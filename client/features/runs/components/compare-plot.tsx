@@ -53,7 +53,7 @@ export function ComparePlot({ a, b }: { a: Side; b: Side }) {
         view={view}
         onViewChange={(next) => change({ view: next })}
       />
-      <PlotHints view={view} end={end} onViewChange={(next) => change({ view: next })} />
+      <PlotHints view={view} whole={[0, end]} onViewChange={(next) => change({ view: next })} />
     </PlotCard>
   )
 }

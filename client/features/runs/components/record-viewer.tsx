@@ -106,7 +106,7 @@ export function RecordViewer({ run, columns }: RecordViewerProps) {
           view={view}
           onViewChange={(next) => change({ view: next })}
         />
-        <PlotHints view={view} end={end} onViewChange={(next) => change({ view: next })} />
+        <PlotHints view={view} whole={[0, end]} onViewChange={(next) => change({ view: next })} />
       </PlotCard>
     </div>
   )

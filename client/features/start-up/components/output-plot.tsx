@@ -10,6 +10,7 @@ import { saveText, spanCsv } from '#client/components/charts/span-csv.ts'
 import { WaveformChart, wholeView } from '#client/components/charts/waveform-chart.tsx'
 import { Button } from '#client/components/ui/button.tsx'
 import { Checkbox } from '#client/components/ui/checkbox.tsx'
+import { envelopeLine } from '#client/features/start-up/lib/envelope-line.ts'
 import { startUpSeries, type SeriesChoice } from '#client/features/start-up/lib/start-up-series.ts'
 import { formatQuantity } from '#shared/units/format.ts'
 import type { Simulation } from '#sim/types.ts'
@@ -24,12 +25,13 @@ export interface OutputPlotProps {
 }
 
 export function OutputPlot({ simulation, spans, ...rest }: OutputPlotProps) {
-  const { sampleInterval, envelope, figures, control } = simulation
+  const { sampleInterval, figures, control } = simulation
   const { view, onViewChange, cursors } = rest
   const [choice, setChoice] = useState<SeriesChoice>({ node: false, control: false })
   const [saving, setSaving] = useState(false)
   const series = useMemo(() => startUpSeries(simulation, choice), [simulation, choice])
   const overview = useMemo(() => startUpSeries(simulation, { node: false, control: false }), [simulation])
+  const envelope = useMemo(() => envelopeLine(simulation.envelope), [simulation.envelope])
   const whole = wholeView(overview, sampleInterval)
   const timeTo90 = figures?.timeTo90 ?? null
   const marks = useMemo(
@@ -88,7 +90,7 @@ export function OutputPlot({ simulation, spans, ...rest }: OutputPlotProps) {
             onChange={(event) => setChoice({ ...choice, control: event.target.checked })}
           />
         )}
-        <PlotHints view={view} end={whole[1]} onViewChange={onViewChange} />
+        <PlotHints view={view} whole={whole} onViewChange={onViewChange} />
       </div>
     </PlotCard>
   )

@@ -1,7 +1,7 @@
 /** Frequency, level, distortion and their kin, with their definitions at hand. */
 import { Card } from '#client/components/ui/card.tsx'
 import { figure, type FigureKey, type Figures } from '#shared/figures.ts'
-import { formatPercent, quantityParts } from '#shared/units/format.ts'
+import { percentParts, quantityParts } from '#shared/units/format.ts'
 
 const main: FigureKey[] = ['frequency', 'level', 'rms', 'mean', 'thd', 'thdAtInput']
 const further: FigureKey[] = ['high', 'low', 'peakOutputCurrent']
@@ -10,8 +10,10 @@ const shown = [...main, ...further]
 function Value({ name, value }: { name: FigureKey; value: number | null }) {
   const { unit, shownAs } = figure(name)
   if (value === null) return <>–</>
-  if (shownAs === 'percent') return <>{formatPercent(value)}</>
-  const parts = quantityParts(value, unit, { digits: name === 'frequency' ? 6 : 4 })
+  const parts =
+    shownAs === 'percent'
+      ? percentParts(value)
+      : quantityParts(value, unit, { digits: name === 'frequency' ? 6 : 4 })
   return (
     <>
       {parts.number} <span className="text-base font-normal text-soft">{parts.unit}</span>

@@ -2,6 +2,7 @@
 import { useMemo, useState } from 'react'
 import type { Cursors, View } from '#client/components/charts/chart-types.ts'
 import { CursorTable } from '#client/components/charts/cursor-table.tsx'
+import { PlotHints } from '#client/components/charts/plot-hints.tsx'
 import { PlotCard } from '#client/components/charts/plot-card.tsx'
 import { waveformTable } from '#client/components/charts/plot-table.ts'
 import { WaveformChart, wholeView } from '#client/components/charts/waveform-chart.tsx'
@@ -14,6 +15,7 @@ export function PeriodCard({ tone }: { tone: SettledTone }) {
   const [cursors, setCursors] = useState<Cursors>([null, null])
   const whole = useMemo(() => wholeView(series, sampleInterval), [series, sampleInterval])
   const view = zoom?.of === tone ? zoom.view : whole
+  const change = (next: View) => setZoom({ of: tone, view: next })
   return (
     <PlotCard
       title="One settled period"
@@ -23,11 +25,12 @@ export function PeriodCard({ tone }: { tone: SettledTone }) {
     >
       <WaveformChart
         {...{ sampleInterval, series, view, cursors }}
-        onViewChange={(next) => setZoom({ of: tone, view: next })}
+        onViewChange={change}
         onCursorsChange={setCursors}
         height={260}
         label="One settled period of output and network node, volts over time"
       />
+      <PlotHints view={view} whole={whole} wholeName="Whole period" strip={false} onViewChange={change} />
     </PlotCard>
   )
 }

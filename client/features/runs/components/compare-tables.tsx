@@ -13,15 +13,18 @@ const digits = 5
 
 export function CompareFigures({ a, b }: { a: Run; b: Run }) {
   return (
-    <Section title="Figures" note="B − A, and as a share of A.">
+    <Section
+      title="Figures"
+      note="B − A, and as a share of A; ≈ 0 where a replay of one run may differ as much."
+    >
       <PlainTable caption="Figures of both runs" heads={['Figure', 'A', 'B', 'Difference', 'Share']}>
         {compareFigures(a.figures, b.figures).map((pair) => (
           <tr key={pair.key}>
             <RowHead>{figure(pair.key).name}</RowHead>
             <Cell>{formatFigure(pair.key, pair.a, { digits })}</Cell>
             <Cell>{formatFigure(pair.key, pair.b, { digits })}</Cell>
-            <Cell>{formatDifference(pair.key, pair.difference, true)}</Cell>
-            <Cell>{formatShare(pair.relative, { digits: 3, signed: true })}</Cell>
+            <Cell>{pair.negligible ? '≈ 0' : formatDifference(pair.key, pair.difference, true)}</Cell>
+            <Cell>{pair.negligible ? '≈ 0' : formatShare(pair.relative, { digits: 3, signed: true })}</Cell>
           </tr>
         ))}
       </PlainTable>

@@ -1,5 +1,6 @@
 /** Two runs side by side: which inputs differ, and by how much each figure. */
 import { inputRows, type InputRow } from '#client/features/runs/lib/input-rows.ts'
+import { compareFigure } from '#shared/replay.ts'
 import { figureKeys, type FigureKey, type Figures } from '#shared/figures.ts'
 import type { RunInputs } from '#shared/schemas/simulation.ts'
 
@@ -20,6 +21,8 @@ export interface FigurePair {
   difference: number | null
   /** (b − a) / |a|; null when either is missing or a is zero. */
   relative: number | null
+  /** The difference is not zero, but less than the same run may differ by when it is computed again. */
+  negligible: boolean
 }
 
 const keyOf = (row: InputRow) => `${row.group}/${row.name}`
@@ -44,13 +47,14 @@ export function compareFigures(a: Figures, b: Figures): FigurePair[] {
   return figureKeys.map((key) => {
     const left = a[key]
     const right = b[key]
-    const difference = left === null || right === null ? null : right - left
+    const { difference, passes } = compareFigure(key, left, right)
     return {
       key,
       a: left,
       b: right,
       difference,
       relative: difference === null || !left ? null : difference / Math.abs(left),
+      negligible: passes && difference !== null && difference !== 0,
     }
   })
 }

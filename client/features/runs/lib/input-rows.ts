@@ -16,12 +16,14 @@ export interface InputRow {
 /** Digits that show a typed value as it was typed, and a computed one without its rounding noise. */
 const inputDigits = 6
 
-const rowsOf = (group: string) => (name: string, value: number | undefined, unit: string) => ({
-  group,
-  name,
-  value: value ?? null,
-  text: value === undefined ? 'not stated' : formatQuantity(value, unit, { digits: inputDigits }),
-})
+const rowsOf =
+  (group: string) =>
+  (name: string, value: number | undefined, unit: string, left = 'not stated'): InputRow => ({
+    group,
+    name,
+    value: value ?? null,
+    text: value === undefined ? left : formatQuantity(value, unit, { digits: inputDigits }),
+  })
 
 function controlRows(control: AmplitudeControl): InputRow[] {
   const row = rowsOf('Amplitude control')
@@ -105,8 +107,8 @@ export function inputRows({ circuit, stimulus, timing }: RunInputs): InputRow[] 
     inAmplifier('Output current', amplifier.outputCurrent, 'A'),
     inSupply('Positive supply', supply.positive, 'V'),
     inSupply('Negative supply', supply.negative, 'V'),
-    inSupply('Reference', supply.reference, 'V'),
-    inSupply('Load', circuit.load?.resistance, 'Ω'),
+    inSupply('Reference', supply.reference, 'V', 'middle of the split supply'),
+    inSupply('Load', circuit.load?.resistance, 'Ω', 'none'),
     ...controlRows(circuit.amplitudeControl),
     ...stimulusRows(stimulus),
     inTiming('Duration', timing.duration),

@@ -34,6 +34,17 @@ describe('CompareRunsPage', () => {
     expect(table.getByRole('row', { name: /^Level 7\.5.V 6.V −1\.5.V −20.%$/ })).toBeVisible()
   })
 
+  it('calls a difference that a replay may show no difference', async () => {
+    const frequency = 989.7
+    const moved = makeRun({ id: 2, figures: makeFigures({ frequency: frequency * (1 + 1e-9) }) })
+    const first = makeRun({ id: 1, figures: makeFigures({ frequency }) })
+    serve({ ...answers, 'GET /api/runs/1': json(first), 'GET /api/runs/2': json(moved) })
+    renderRuns(<CompareRunsPage a={1} b={2} />)
+    const table = within(await screen.findByRole('table', { name: 'Figures of both runs' }))
+    expect(table.getByRole('row', { name: /^Frequency 989\.7.Hz 989\.7.Hz ≈ 0 ≈ 0$/ })).toBeVisible()
+    expect(table.getByRole('row', { name: /^Level .* 0 0$/ })).toBeVisible()
+  })
+
   it('sets off the inputs that differ, and shows them alone when asked', async () => {
     serve(answers)
     renderRuns(<CompareRunsPage a={1} b={2} />)

@@ -53,7 +53,7 @@ describe('compareFigures', () => {
   it('gives the second less the first, also as a share of the first', () => {
     // By hand: −8 − (−10) = 2; 2/|−10| = 0.2.
     const row = pair('low', makeFigures({ low: -10 }), makeFigures({ low: -8 }))
-    expect(row).toEqual({ key: 'low', a: -10, b: -8, difference: 2, relative: 0.2 })
+    expect(row).toEqual({ key: 'low', a: -10, b: -8, difference: 2, relative: 0.2, negligible: false })
   })
 
   it('gives no difference where a figure is missing, no share where the first is zero', () => {

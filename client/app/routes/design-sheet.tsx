@@ -55,7 +55,14 @@ function LoadedSheet({ designId }: { designId: number }) {
         <OpenSheet design={design.data} />
       </EngineProvider>
     )
-  if (design.error) return <ErrorState error={design.error} retry={() => void design.refetch()} />
+  if (design.error)
+    return (
+      <ErrorState
+        error={design.error}
+        retry={() => void design.refetch()}
+        action={<LinkButton to="/designs">All designs</LinkButton>}
+      />
+    )
   return <Loading label="Loading the design" />
 }
 

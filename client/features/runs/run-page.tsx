@@ -2,6 +2,7 @@
 import { useQueryClient } from '@tanstack/react-query'
 import { Link, useNavigate } from 'react-router-dom'
 import { ErrorState } from '#client/components/ui/error-state.tsx'
+import { LinkButton } from '#client/components/ui/link-button.tsx'
 import { Loading } from '#client/components/ui/loading.tsx'
 import { PageHeader } from '#client/components/ui/page-header.tsx'
 import { PageTitle } from '#client/components/ui/page-title.tsx'
@@ -89,7 +90,11 @@ export function RunPage({ runId }: { runId: number }) {
       <>
         <PageTitle>Run</PageTitle>
         <PageHeader title="Run" />
-        {error ? <ErrorState error={error} retry={retry} /> : <Loading label="Loading the run" />}
+        {error ? (
+          <ErrorState error={error} retry={retry} action={<LinkButton to="/runs">All runs</LinkButton>} />
+        ) : (
+          <Loading label="Loading the run" />
+        )}
       </>
     )
   return (

@@ -30,6 +30,13 @@ describe('ErrorState', () => {
     await userEvent.click(screen.getByRole('button', { name: 'Try again' }))
     expect(retry).toHaveBeenCalledTimes(1)
   })
+
+  it('leads on from what is not there instead of asking for it again', () => {
+    const action = <a href="/runs">All runs</a>
+    render(<ErrorState error={refusal(404, 'There is no run 9.')} retry={vi.fn()} action={action} />)
+    expect(screen.getByRole('link', { name: 'All runs' })).toBeInTheDocument()
+    expect(screen.queryByRole('button', { name: 'Try again' })).not.toBeInTheDocument()
+  })
 })
 
 describe('Notice', () => {

@@ -19,9 +19,10 @@ function quantity(value: number | null, unit: string, signed = false): string {
 
 export function CursorTable({ series, sampleInterval, cursors }: CursorTableProps) {
   const readings = cursorReadings(series, sampleInterval, cursors)
+  const unplaced = cursors.every((cursor) => cursor === null)
   const cell = 'px-3 py-1.5 text-right'
   return (
-    <div className="overflow-x-auto">
+    <div className="overflow-x-auto" data-print={unplaced ? 'hidden' : undefined}>
       <table className="w-full border-collapse text-sm">
         <caption className="sr-only">Cursor read-outs</caption>
         <thead className="text-soft">

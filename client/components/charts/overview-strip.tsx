@@ -133,7 +133,7 @@ export function OverviewStrip({ series, sampleInterval, view, onViewChange }: Ov
   const edge = 'absolute inset-y-0 w-6 cursor-ew-resize'
   const handle = <span className="absolute inset-y-2.5 left-1/2 w-1 -translate-x-1/2 rounded bg-petrol" />
   return (
-    <div style={{ paddingLeft: frame.left, paddingRight: frame.right }}>
+    <div data-print="hidden" style={{ paddingLeft: frame.left, paddingRight: frame.right }}>
       <div
         ref={track}
         onPointerDown={centreAt}

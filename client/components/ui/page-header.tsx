@@ -19,7 +19,11 @@ export function PageHeader({ title, over, chips, actions }: PageHeaderProps) {
         <h1 className="text-2xl font-medium wrap-break-word">{title}</h1>
       </div>
       {chips && <div className="flex flex-wrap gap-2 pb-0.5">{chips}</div>}
-      {actions && <div className="ml-auto flex flex-wrap gap-2">{actions}</div>}
+      {actions && (
+        <div data-print="hidden" className="ml-auto flex flex-wrap gap-2">
+          {actions}
+        </div>
+      )}
     </div>
   )
 }

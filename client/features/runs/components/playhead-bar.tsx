@@ -36,7 +36,7 @@ export function PlayheadBar(props: PlayheadBarProps) {
   const limited = mode !== 'linear'
   const now = formatQuantity(time, 's', { digits: 6 })
   return (
-    <div role="group" aria-label="Playhead" className="space-y-2 px-4 py-3">
+    <div role="group" aria-label="Playhead" data-print="hidden" className="space-y-2 px-4 py-3">
       <div className="flex flex-wrap items-baseline gap-x-4">
         <p className="min-w-32 text-lg font-medium">{now}</p>
         <p aria-live={playhead.playing ? 'off' : 'polite'} className={limited ? 'text-copper' : 'text-soft'}>

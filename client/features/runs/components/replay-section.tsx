@@ -29,7 +29,7 @@ export function ReplaySection({ run, replay }: { run: Run; replay: Replay }) {
   return (
     <Section title="Replay" actions={action}>
       {state.kind === 'idle' && (
-        <p className="max-w-prose px-4 pb-4 text-soft">
+        <p data-print="hidden" className="max-w-prose px-4 pb-4 text-soft">
           Computes the run again from its inputs, here in your browser, and compares every figure and every
           sample with what is stored.
         </p>

@@ -5,6 +5,11 @@ import type { ModeShares } from '#client/features/start-up/lib/mode-shares.ts'
 import { formatPercent } from '#shared/units/format.ts'
 import type { Mode } from '#sim/types.ts'
 
+/** Below this a share is a brief event, and more digits of it say nothing. */
+const leastShare = 1e-4
+const inWords = (share: number) =>
+  share < leastShare ? `under ${formatPercent(leastShare)}` : formatPercent(share, { digits: 3 })
+
 const parts: { mode: Mode; name: string; fill: string }[] = [
   { mode: 'heldHigh', name: 'held at the upper rail', fill: 'bg-copper' },
   { mode: 'slewDown', name: 'slewing down', fill: 'bg-slate' },
@@ -32,7 +37,7 @@ export function SharesCard({ shares: { of, shares } }: { shares: ModeShares }) {
               <span aria-hidden="true" className={classNames('size-3 rounded-xs', fill)} />
               {name}
             </dt>
-            <dd className="ml-auto font-medium">{formatPercent(shares[mode], { digits: 3 })}</dd>
+            <dd className="ml-auto font-medium">{inWords(shares[mode])}</dd>
           </div>
         ))}
       </dl>

@@ -1,5 +1,9 @@
 /** Bundles the server: the process, its worker thread and the admin command, every package left outside. */
+import { rmSync } from 'node:fs'
 import { build } from 'esbuild'
+
+// A build by hand may be of other sources than the stamp says: only `prepare.mjs` writes it, after this.
+rmSync('dist/.built', { force: true })
 
 await build({
   entryPoints: {

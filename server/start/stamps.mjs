@@ -3,7 +3,7 @@
  * installed.
  */
 import { createHash } from 'node:crypto'
-import { existsSync, mkdirSync, readdirSync, readFileSync, statSync, writeFileSync } from 'node:fs'
+import { existsSync, mkdirSync, readdirSync, readFileSync, rmSync, statSync, writeFileSync } from 'node:fs'
 import { dirname, join } from 'node:path'
 
 /** @param {string} path @returns {string[]} the file itself, or every file below the folder, sorted */
@@ -24,15 +24,27 @@ export function hashOf(paths) {
 }
 
 /**
- * Runs `make` unless `stamp` already holds the hash of `inputs`; writes the stamp only after `make` succeeded.
- * @param {{ stamp: string, inputs: string[], make: () => void }} step
- * @returns {boolean} whether it had to make
+ * Something made from files: `stamp` holds the hash of `inputs` when `outputs` were made from them.
+ * @typedef {{ stamp: string, inputs: string[], outputs?: string[], make: () => unknown }} Step
  */
-export function whenChanged({ stamp, inputs, make }) {
-  const hash = hashOf(inputs)
-  if (existsSync(stamp) && readFileSync(stamp, 'utf8') === hash) return false
-  make()
-  mkdirSync(dirname(stamp), { recursive: true })
-  writeFileSync(stamp, hash)
+
+/** @param {Step} step */
+export function isUpToDate({ stamp, inputs, outputs = [] }) {
+  return existsSync(stamp) && readFileSync(stamp, 'utf8') === hashOf(inputs) && outputs.every(existsSync)
+}
+
+/**
+ * Runs `make` unless everything is up to date. The stamp is taken away before and written only after `make` succeeded:
+ * what failed halfway is made anew, whatever the inputs are by then.
+ * @param {Step} step
+ * @returns {Promise<boolean>} whether it had to make
+ */
+export async function whenChanged(step) {
+  if (isUpToDate(step)) return false
+  const hash = hashOf(step.inputs)
+  rmSync(step.stamp, { force: true })
+  await step.make()
+  mkdirSync(dirname(step.stamp), { recursive: true })
+  writeFileSync(step.stamp, hash)
   return true
 }

@@ -16,7 +16,7 @@ const arm = 5.5
 
 /** A pole in words; a conjugate pair as one. */
 function poleText({ re, im }: Complex): string {
-  const real = formatQuantity(re, '/s', { digits: 4, signed: true })
+  const real = formatQuantity(re, '1/s', { digits: 4, signed: true })
   return im === 0 ? real : `${real} ± j${formatQuantity(Math.abs(im), 'rad/s', { digits: 4 })}`
 }
 

@@ -18,7 +18,7 @@ export function PolesCard({ smallSignal }: { smallSignal: SmallSignal }) {
       })}
     >
       <p className="px-2 pb-2 text-sm text-soft">
-        Growth rate {formatQuantity(growthRate, '/s', { digits: 4, signed: true })}
+        Growth rate {formatQuantity(growthRate, '1/s', { digits: 4, signed: true })}
         {frequency > 0 && `, turning at ${formatQuantity(frequency, 'Hz', { digits: 5 })}`}
       </p>
       <PolePlot poles={poles} />

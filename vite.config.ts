@@ -17,5 +17,10 @@ export default defineConfig({
     assetsInlineLimit: 0,
     sourcemap: true,
   },
-  server: { host: '127.0.0.1', port: 5173, proxy: { '/api': apiTarget } },
+  server: {
+    host: '127.0.0.1',
+    port: 5173,
+    // The host stays as the browser names it: the server compares it with the page's origin.
+    proxy: { '/api': { target: apiTarget, changeOrigin: false } },
+  },
 })

@@ -8,6 +8,7 @@ export type Theme = 'light' | 'dark'
 
 const storageKey = 'sinewright.theme'
 const systemDark = mediaQuery('(prefers-color-scheme: dark)')
+const paper = mediaQuery('print')
 const listeners = new Set<() => void>()
 
 /** Storage may be barred by the browser's settings; then the choice lasts as long as the page. */
@@ -43,6 +44,7 @@ export function startTheme(): void {
   choice = stored()
   apply()
   systemDark.subscribe(apply)
+  paper.subscribe(apply)
   window.addEventListener('storage', (event) => {
     if (event.key !== storageKey) return
     choice = stored()
@@ -60,7 +62,9 @@ export function chooseTheme(next: ThemeChoice): void {
   apply()
 }
 
+/** As the style sheet has it: never dark on paper. */
 function resolved(): Theme {
+  if (paper.matches()) return 'light'
   if (choice !== 'auto') return choice
   return systemDark.matches() ? 'dark' : 'light'
 }

@@ -6,18 +6,19 @@ const root = document.documentElement
 /** A fresh module under a system that prefers dark or light, and can change its mind. */
 async function themeUnder(dark: boolean) {
   const list = Object.assign(new EventTarget(), { matches: dark })
-  vi.stubGlobal('matchMedia', () => list)
+  const paper = Object.assign(new EventTarget(), { matches: false })
+  vi.stubGlobal('matchMedia', (query: string) => (query === 'print' ? paper : list))
   vi.resetModules()
   const theme = await import('#client/lib/theme.ts')
   theme.startTheme()
   function Shown() {
     return <p>{`${theme.useThemeChoice()} ${theme.useTheme()}`}</p>
   }
-  const turn = (now: boolean) => {
-    list.matches = now
-    list.dispatchEvent(new Event('change'))
+  const set = (query: typeof list) => (now: boolean) => {
+    query.matches = now
+    query.dispatchEvent(new Event('change'))
   }
-  return { ...theme, Shown, turn }
+  return { ...theme, Shown, turn: set(list), print: set(paper) }
 }
 
 beforeEach(() => localStorage.clear())
@@ -31,6 +32,15 @@ describe('theme', () => {
     expect(root).not.toHaveAttribute('data-theme')
     act(() => turn(false))
     expect(screen.getByText('auto light')).toBeInTheDocument()
+  })
+
+  it('is light on paper, so that what is drawn on canvas can be read there', async () => {
+    const { Shown, print } = await themeUnder(true)
+    render(<Shown />)
+    act(() => print(true))
+    expect(screen.getByText('auto light')).toBeInTheDocument()
+    act(() => print(false))
+    expect(screen.getByText('auto dark')).toBeInTheDocument()
   })
 
   it('keeps a choice, in the document and over a reload', async () => {

@@ -43,13 +43,16 @@ function plain(value: number, digits: number): string {
 
 /**
  * A value in SI units as engineering number and prefixed unit: 989.69 Hz, 2.2 kΩ, −1.5 mV. A unit that begins with
- * `1/` takes no prefix: k1/s would say nothing.
+ * `1/` takes no prefix: k1/s would say nothing. A slew rate is in V/µs, as every data sheet has it.
  */
 export function quantityParts(value: number, unit: string, options: FormatOptions = {}): QuantityParts {
   const { digits = 4, signed = false } = options
   if (Number.isNaN(value)) return { number: '–', unit }
   if (!Number.isFinite(value)) return { number: withSign(value < 0 ? '-∞' : '∞', signed), unit }
   if (value === 0) return { number: '0', unit }
+  // Slew rates are given in volts a microsecond.
+  if (unit === 'V/s' && Math.abs(value) >= 1e3)
+    return { number: withSign(plain(value / 1e6, digits), signed), unit: 'V/µs' }
   const rounded = Number(value.toPrecision(digits))
   const decade = Math.floor(Math.log10(Math.abs(rounded)) / 3 + 1e-12) * 3
   const exponent = unit.startsWith('1/') ? 0 : Math.min(12, Math.max(-18, decade))

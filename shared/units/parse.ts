@@ -44,13 +44,14 @@ function isUnit(text: string, unit: string): boolean {
 
 /** Power of ten of a prefix with or without the unit behind it, or null when it is neither. */
 function tailExponent(tail: string, unit: string): number | null {
+  // Slew rates are given in volts a microsecond: a bare number is one.
+  if (unit === 'V/s' && tail === '') return 6
   if (isUnit(tail, unit)) return 0
   if (unit === '%' || tail === '%') return null
   const exponent = exponents[tail.charAt(0)]
   if (exponent !== undefined && isUnit(tail.slice(1), unit)) return exponent
   // IEC 60062 writes kilo-ohms with a capital K; kelvin is the only unit that the letter could be taken for.
   if (tail.startsWith('K') && unit !== 'K' && isUnit(tail.slice(1), unit)) return 3
-  // Slew rates are given in volts a microsecond.
   if (unit === 'V/s' && /^V\/[um]s$/.test(tail)) return tail === 'V/us' ? 6 : 3
   return null
 }

@@ -11,6 +11,11 @@ describe('formatQuantity', () => {
     expect(formatQuantity(0, 'V')).toBe('0\u2009V')
   })
   it('writes a true minus sign', () => expect(formatQuantity(-1.5e-3, 'V')).toBe('\u22121.5\u2009mV'))
+  it('gives slew rates in volts a microsecond, as data sheets do (common practice, no source)', () => {
+    expect(formatQuantity(5e5, 'V/s')).toBe('0.5\u2009V/µs')
+    expect(formatQuantity(1e8, 'V/s')).toBe('100\u2009V/µs')
+    expect(formatQuantity(40, 'V/s')).toBe('40\u2009V/s')
+  })
   it('has no number for what is not a number', () => expect(formatQuantity(Number.NaN, 'V')).toContain('–'))
 })
 

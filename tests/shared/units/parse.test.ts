@@ -63,6 +63,10 @@ describe('parseQuantity, SI prefixes (SI brochure, 9th edition, table 7)', () =>
     ['1 TΩ', 'Ω', 1e12],
     ['0.5 V/µs', 'V/s', 5e5],
     ['500 kV/s', 'V/s', 5e5],
+    // Data sheets state slew rates in V/µs (common practice, no source).
+    ['13', 'V/s', 1.3e7],
+    ['0,5', 'V/s', 5e5],
+    ['40 V/s', 'V/s', 40],
     ['300 K', 'K', 300],
     ['80 µW/K', 'W/K', 8e-5],
     ['.5', '', 0.5],

@@ -17,7 +17,7 @@ const fasterThanIntegrator = ['circuit', 'amplifier', 'gainBandwidth']
 
 /** An amplifier so fast that following it would take more work than a computation may. */
 export function tooStiff(evaluations: number, limit: number, duration: number): Failure {
-  const times = (evaluations / limit).toPrecision(2)
+  const times = (evaluations / limit).toPrecision(3)
   return {
     kind: 'solver',
     path: fasterThanIntegrator,

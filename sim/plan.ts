@@ -8,12 +8,13 @@ import type { Timing } from '#shared/schemas/simulation.ts'
 import type { Stimulus } from '#shared/schemas/stimulus.ts'
 import { formatNumber, formatQuantity } from '#shared/units/format.ts'
 import { naturalRate } from '#sim/circuit/loop-polynomial.ts'
+import { railsUp } from '#sim/circuit/rails.ts'
 import { invalid } from '#sim/failures.ts'
 import { settlingTime } from '#sim/settling-time.ts'
 import { smallSignal } from '#sim/small-signal.ts'
 import { startLevel } from '#sim/start-level.ts'
 import type { Failure, SmallSignal } from '#sim/types.ts'
-import { affordableDuration } from '#sim/work.ts'
+import { affordableDuration, allowedDuration } from '#sim/work.ts'
 
 export interface Plan {
   /** s. */
@@ -29,6 +30,8 @@ const settledPeriods = 24
 const settledShare = 0.15
 /** Shortest automatic record, periods. */
 const leastPeriods = 30
+/** Fewest periods worth showing where the work allowed does not reach further. */
+const fewestPeriods = 8
 /** A decay is shown over this many of its time constants. */
 const decaysShown = 5
 /** Samples per period are at least this many when chosen here, unless the record would grow too long to be stored. */
@@ -63,20 +66,11 @@ function expectedPeriod(circuit: Circuit, linear: SmallSignal): number {
   return linear.frequency > 0 ? Math.max(own, 1 / linear.frequency) : own
 }
 
-/** When the last disturbance of the stimulus is over, s. */
-function stimulusEnd(stimulus: Stimulus): number {
-  if (stimulus.kind !== 'ramp') return 0
-  return Math.max(
-    stimulus.positive.delay + stimulus.positive.riseTime,
-    stimulus.negative.delay + stimulus.negative.riseTime,
-  )
-}
-
 /** Time that shows the start-up and the settled tone, or the decay, s. */
 function showingTime(circuit: Circuit, stimulus: Stimulus, linear: SmallSignal): number {
   const period = expectedPeriod(circuit, linear)
   const shortest = leastPeriods * period
-  const after = stimulusEnd(stimulus)
+  const after = railsUp(stimulus)
   if (!linear.starts)
     return after + Math.max(shortest, decaysShown / Math.max(-linear.growthRate, Number.MIN_VALUE))
   const { supply, amplifier } = circuit
@@ -91,12 +85,14 @@ function automaticDuration(circuit: Circuit, stimulus: Stimulus, linear: SmallSi
   const most = Math.min(
     limits.duration[1],
     (limits.periods * period) / durationSteps[1]!,
-    stimulusEnd(stimulus) + Math.max(leastPeriods * period, affordableDuration(linear)),
+    railsUp(stimulus) + Math.max(leastPeriods * period, affordableDuration(circuit, linear)),
   )
-  return roundedUp(
+  const wished = roundedUp(
     Math.min(most, Math.max(limits.duration[0], showingTime(circuit, stimulus, linear))),
     durationSteps,
   )
+  const allowed = allowedDuration(circuit, linear)
+  return wished > allowed && allowed > fewestPeriods * period ? roundedDown(allowed, durationSteps) : wished
 }
 
 function automaticInterval(period: number, duration: number): number {

@@ -21,7 +21,7 @@ import type { Failure, SimulateOptions, Simulation, SmallSignal } from '#sim/typ
 import { mostEvaluations, predictedEvaluations } from '#sim/work.ts'
 
 /** Error per step relative to the amplitude, and the same while a stiff amplifier keeps the steps short anyway. */
-const tolerance = 1e-9
+const tolerance = 1e-10
 const stiffTolerance = 1e-7
 /** Longest integration step as a share of 1/ω0 · 2π. */
 const stepsPerPeriod = 8
@@ -113,7 +113,7 @@ export function simulate(circuit: Circuit, options: SimulateOptions): Simulation
   const linear = smallSignal(circuit)
   const samples = Math.round(options.duration / options.sampleInterval) + 1
   const duration = (samples - 1) * options.sampleInterval
-  const predicted = predictedEvaluations(linear, duration)
+  const predicted = predictedEvaluations(circuit, linear, duration)
   if (predicted > mostEvaluations)
     return emptySimulation(options, tooStiff(predicted, mostEvaluations, duration))
 
@@ -141,7 +141,8 @@ export function simulate(circuit: Circuit, options: SimulateOptions): Simulation
     linear,
     cycles: cycles.list,
     modes: spans.list,
-    duration,
+    plant,
+    end: position,
   }
   options.onProgress?.(1)
   return {

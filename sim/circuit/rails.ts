@@ -56,3 +56,10 @@ export function railPieces({ supply, amplifier }: Circuit, stimulus: Stimulus): 
     low: lineFrom(low, start),
   }))
 }
+
+/** When both supplies have their full value, s. */
+export function railsUp(stimulus: Stimulus): number {
+  if (stimulus.kind !== 'ramp') return 0
+  const { positive, negative } = stimulus
+  return Math.max(positive.delay + positive.riseTime, negative.delay + negative.riseTime)
+}

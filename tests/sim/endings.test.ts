@@ -53,6 +53,30 @@ describe('a record without settled figures says why', () => {
     expect(shorter.unsettled).toMatch(/ends within the first cycles/)
   })
 
+  it('the record ends before the supplies are up', () => {
+    const late = { delay: 1, riseTime: 0 }
+    const stimulus: Stimulus = { kind: 'ramp', positive: late, negative: { delay: 0, riseTime: 0 } }
+    const { unsettled } = runOf(makeCircuit(), stimulus, { duration: 0.02, sampleInterval: 10e-6 })
+    expect(unsettled).toMatch(/^The record of 20\sms ends before the supplies are up at 1\ss: lengthen/)
+  })
+
+  it('a short record that ends slewing, or held but not at rest, is only too short', () => {
+    const slewing = runOf(
+      makeCircuit({ amplifier: { slewRate: 3e3 } }),
+      { kind: 'kick', voltage: 3 },
+      { duration: 0.5e-3, sampleInterval: 1e-6 },
+    )
+    expect(slewing.modes.at(-1)!.mode).toBe('slewUp')
+    expect(slewing.unsettled).toMatch(/ends within the first cycles/)
+    // Independent computation: held from 41.4 µs to 1.634 ms, then it slews to the other rail.
+    const held = runOf(makeCircuit({ gain: { feedbackR: 1e6 } }), fromOffset, {
+      duration: 1.5e-3,
+      sampleInterval: 1e-6,
+    })
+    expect(held.modes.at(-1)!.mode).toBe('heldHigh')
+    expect(held.unsettled).toMatch(/ends within the first cycles/)
+  })
+
   it('a kicked loop that hardly grows is not taken for settled', () => {
     const circuit = makeCircuit({ gain: { feedbackR: 20.0008e3 } })
     const { unsettled } = runOf(

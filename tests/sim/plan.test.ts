@@ -1,8 +1,9 @@
 import fc from 'fast-check'
 import { describe, expect, it } from 'vitest'
 import { limits } from '#shared/limits.ts'
-import { plan, smallSignal, type Failure, type Plan } from '#sim/index.ts'
-import { makeCircuit } from '#tests/sim/support/circuits.ts'
+import { plan, simulate, smallSignal, type Failure, type Plan } from '#sim/index.ts'
+import { mostEvaluations, predictedEvaluations } from '#sim/work.ts'
+import { diodes, makeCircuit } from '#tests/sim/support/circuits.ts'
 
 const automatic = { duration: null, sampleInterval: null }
 
@@ -41,6 +42,30 @@ describe('plan', () => {
     const { duration } = planned(circuit, automatic, { kind: 'offset' })
     expect(duration / decay).toBeGreaterThan(4)
     expect(duration / decay).toBeLessThan(10)
+  })
+
+  it('never chooses a record that would be refused as too much work, where that leaves enough to see', () => {
+    const circuit = makeCircuit({
+      network: { seriesC: 800e-9, shuntC: 800e-9 },
+      amplifier: { gainBandwidth: 10e6 },
+    })
+    const { duration } = planned(circuit, automatic, { kind: 'offset' })
+    const linear = smallSignal(circuit)
+    expect(predictedEvaluations(circuit, linear, duration)).toBeLessThan(mostEvaluations)
+    expect(duration * linear.frequency).toBeGreaterThan(8)
+  })
+
+  it('reckons with the faster amplifier while the diodes conduct', () => {
+    const circuit = makeCircuit({ amplifier: { gainBandwidth: 20e6 }, amplitudeControl: diodes })
+    const duration = 10e-3
+    const { cost } = simulate(circuit, {
+      stimulus: { kind: 'kick', voltage: 1 },
+      duration,
+      sampleInterval: 10e-6,
+    })
+    const predicted = predictedEvaluations(circuit, smallSignal(circuit), duration)
+    expect(predicted / cost.evaluations).toBeGreaterThan(0.8)
+    expect(predicted / cost.evaluations).toBeLessThan(2)
   })
 
   it('chooses few significant digits, 200 to 500 samples a period, and never more than is kept', () => {

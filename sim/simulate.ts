@@ -62,11 +62,11 @@ function optionFault({ duration, sampleInterval }: SimulateOptions): Failure | n
   return null
 }
 
-function emptySimulation(options: SimulateOptions, failure: Failure): Simulation {
+function emptySimulation(options: SimulateOptions, reason: Failure): Simulation {
   const none = () => new Float64Array(0)
   return {
     status: 'failed',
-    failure,
+    reason,
     sampleInterval: options.sampleInterval,
     vo: none(),
     v1: none(),
@@ -149,7 +149,7 @@ export function simulate(circuit: Circuit, options: SimulateOptions): Simulation
     status: complete ? 'complete' : outcome === 'stopped' ? 'stopped' : 'failed',
     ...(complete
       ? {}
-      : { failure: outcome === 'stopped' ? stoppedFailure : solverFailure(outcome, position.t) }),
+      : { reason: outcome === 'stopped' ? stoppedFailure : solverFailure(outcome, position.t) }),
     sampleInterval: options.sampleInterval,
     vo: columns.vo.subarray(0, columns.filled),
     v1: columns.v1.subarray(0, columns.filled),

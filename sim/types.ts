@@ -90,7 +90,8 @@ export interface SimulateOptions {
 
 export interface Simulation {
   status: 'complete' | 'stopped' | 'failed'
-  failure?: Failure
+  /** Why it did not complete. */
+  reason?: Failure
   sampleInterval: number
   /** Columns of round(duration/sampleInterval) + 1 samples, V; only the valid ones when stopped or failed. */
   vo: Float64Array

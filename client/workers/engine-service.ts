@@ -37,7 +37,7 @@ export const engineService: EngineService = {
     try {
       const simulation = simulateRun(inputs, { onProgress })
       if ('sentence' in simulation) return simulation
-      if (simulation.status !== 'complete') return simulation.failure ?? fault('it stopped early')
+      if (simulation.status !== 'complete') return simulation.reason ?? fault('it stopped early')
       const grid = plan(inputs.circuit, inputs.timing, inputs.stimulus)
       if ('sentence' in grid) return grid
       const result: RecordResult = { simulation, grid, engineVersion }

@@ -46,7 +46,7 @@ export function computeRun(inputs: RunInputs): ComputedRun | Failure {
   if ('kind' in simulation) return simulation
   if (!simulation.figures) {
     const sentence = `The computation ended as ${simulation.status} without figures.`
-    return simulation.failure ?? { kind: 'solver', path: [], sentence }
+    return simulation.reason ?? { kind: 'solver', path: [], sentence }
   }
   const columns = columnsOf(simulation)
   return {

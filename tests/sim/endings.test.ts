@@ -100,7 +100,7 @@ describe('stopping', () => {
       shouldStop: () => ++asked > 5,
     })
     expect(stopped.status).toBe('stopped')
-    expect(stopped.failure?.kind).toBe('stopped')
+    expect(stopped.reason?.kind).toBe('stopped')
     expect(stopped.figures).toBeNull()
     expect(stopped.vo.length).toBeGreaterThan(100)
     expect(stopped.vo.length).toBeLessThan(5000)
@@ -188,7 +188,7 @@ describe('extreme circuits', () => {
     '%s',
     (_name, circuit, stimulus) => {
       const run = runOf(circuit, stimulus)
-      const told = run.failure?.sentence ?? run.unsettled
+      const told = run.reason?.sentence ?? run.unsettled
       if (told) expect(told).toMatch(/\.$/)
       else expect(run.figures!.level!).toBeGreaterThan(0)
       expect(run.vo.every(Number.isFinite)).toBe(true)

@@ -48,7 +48,7 @@ export function useReplay(run: Run, columns: readonly Float64Array[]): Replay {
     const { simulation, engineVersion } = answer
     if (!simulation.figures) {
       const sentence =
-        simulation.failure?.sentence ?? 'The computation ended before the whole record was there.'
+        simulation.reason?.sentence ?? 'The computation ended before the whole record was there.'
       return { kind: 'failed', sentence }
     }
     const stored = { figures: run.figures, sampleInterval: run.record.sampleInterval, columns }

@@ -102,7 +102,7 @@ function DataRows({ title, table }: { title: string; table: PlotTable }) {
 export function PlotCard({ title, keyItems, table, actions, children, footer, className }: PlotCardProps) {
   const [asTable, setAsTable] = useState(false)
   return (
-    <Card className={className}>
+    <Card className={classNames('break-inside-avoid', className)}>
       <div className="flex flex-wrap items-center gap-x-5 gap-y-1 px-4 pt-3 pb-1">
         <h2 className="text-base font-medium">{title}</h2>
         {keyItems && <PlotKey items={keyItems} />}

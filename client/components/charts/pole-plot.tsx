@@ -29,7 +29,7 @@ export function PolePlot({ poles, height = 190 }: PolePlotProps) {
   const told = shown.filter((pole) => pole.im >= 0)
   return (
     <div className="px-2">
-      <div ref={box} className="w-full min-w-0" style={{ height }}>
+      <div ref={box} data-plot className="w-full min-w-0" style={{ height }}>
         <svg
           role="img"
           aria-label={`Poles at ${told.map(poleText).join(' and ')}; right of the axis a disturbance grows, left of it dies out.`}

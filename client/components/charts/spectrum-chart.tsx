@@ -45,7 +45,7 @@ export function SpectrumChart({ stems, fundamental, scale, height = 260, label }
   const x = (index: number) => frame.left + (index + 0.75) * spacing
   const y = (share: number) => frame.top + (1 - share) * plotHeight
   return (
-    <div ref={box} className="w-full min-w-0" style={{ height }}>
+    <div ref={box} data-plot className="w-full min-w-0" style={{ height }}>
       <svg role="img" aria-label={label} width={width} height={height} className="block text-xs">
         {levelTicks(floor).map((level) => (
           <g key={level}>

@@ -91,6 +91,7 @@ export function WaveformChart(props: WaveformChartProps) {
   return (
     <div
       ref={container}
+      data-plot
       role="application"
       aria-roledescription="waveform plot"
       aria-label={label}

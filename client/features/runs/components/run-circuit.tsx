@@ -37,7 +37,7 @@ export interface RunCircuitProps {
 export const RunCircuit = memo(function RunCircuit({ circuit, limit }: RunCircuitProps) {
   const { reference } = circuit.supply
   return (
-    <Card className="overflow-x-auto pt-2">
+    <Card className="break-inside-avoid overflow-x-auto pt-2">
       <CircuitDrawing
         values={slots(circuit)}
         control={circuit.amplitudeControl.kind}

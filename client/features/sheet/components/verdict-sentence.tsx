@@ -1,5 +1,6 @@
 import { verdict, type Phrase, type RecordFacts } from '#client/features/sheet/verdict.ts'
 import type { LiveResult } from '#client/lib/live-result.ts'
+import { thinSpace } from '#shared/units/format.ts'
 import type { Circuit } from '#shared/schemas/circuit.ts'
 
 const marks: Record<NonNullable<Phrase['mark']>, string> = {
@@ -13,6 +14,9 @@ const marks: Record<NonNullable<Phrase['mark']>, string> = {
 function factsOf({ simulation, grid, stale }: LiveResult): RecordFacts | null {
   return simulation && grid && !stale ? { figures: simulation.figures, duration: grid.duration } : null
 }
+
+/** A number keeps its unit beside it: the narrow space becomes one that does not break. */
+const unbroken = (text: string) => text.replaceAll(thinSpace, '\u202f')
 
 const noAnswer = 'There is no answer for these values. Change one to try again.'
 
@@ -31,10 +35,10 @@ export function VerdictSentence({ live, circuit }: { live: LiveResult; circuit: 
       {phrases.map(({ text, mark }, index) =>
         mark ? (
           <b key={index} className={marks[mark]}>
-            {text}
+            {unbroken(text)}
           </b>
         ) : (
-          <span key={index}>{text}</span>
+          <span key={index}>{unbroken(text)}</span>
         ),
       )}
     </p>

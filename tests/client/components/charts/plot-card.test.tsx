@@ -62,7 +62,7 @@ describe('PolePlot', () => {
     ]
     const { container } = render(<PolePlot poles={poles} />)
     expect(screen.getByRole('img')).toHaveAccessibleName(
-      /Poles at \+61\.7\s\/s ± j6\.221\skrad\/s; right of the axis/u,
+      /Poles at \+61\.7\s1\/s ± j6\.221\skrad\/s; right of the axis/u,
     )
     expect(container.querySelectorAll('[data-pole="grows"]')).toHaveLength(2)
     expect(screen.getByText(/2\.08\sM\/s: too fast to matter/u)).toBeVisible()

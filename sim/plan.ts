@@ -6,7 +6,7 @@ import { limits } from '#shared/limits.ts'
 import type { Circuit } from '#shared/schemas/circuit.ts'
 import type { Timing } from '#shared/schemas/simulation.ts'
 import type { Stimulus } from '#shared/schemas/stimulus.ts'
-import { formatNumber, formatQuantity } from '#shared/units/format.ts'
+import { formatCount, formatQuantity } from '#shared/units/format.ts'
 import { naturalRate } from '#sim/circuit/loop-polynomial.ts'
 import { railsUp } from '#sim/circuit/rails.ts'
 import { invalid } from '#sim/failures.ts'
@@ -113,7 +113,7 @@ export function plan(circuit: Circuit, timing: Timing, stimulus: Stimulus): Plan
   if (periods > limits.periods)
     return invalid(
       ['timing', 'duration'],
-      `Duration spans ${formatNumber(periods)} periods of ${formatQuantity(period, 's')}: at most ${limits.periods} are computed.`,
+      `The duration covers ${formatCount(periods)} periods of ${formatQuantity(period, 's')}; at most ${formatCount(limits.periods)} are computed.`,
     )
   const sampleInterval = timing.sampleInterval ?? automaticInterval(period, duration)
   if (sampleInterval > duration)
@@ -125,7 +125,7 @@ export function plan(circuit: Circuit, timing: Timing, stimulus: Stimulus): Plan
   if (samples > limits.samples)
     return invalid(
       ['timing', timing.sampleInterval === null ? 'duration' : 'sampleInterval'],
-      `The record would have ${formatNumber(samples, { digits: 7 })} samples: at most ${limits.samples} are kept. Lengthen the sample interval or shorten the duration.`,
+      `The record would have ${formatCount(samples)} samples; at most ${formatCount(limits.samples)} are kept. Lengthen the sample interval or shorten the duration.`,
     )
   return { duration, sampleInterval, samples }
 }

@@ -92,3 +92,10 @@ export function formatInput(value: number, digits = 6): string {
   const parts = quantityParts(value, '', { digits })
   return `${parts.number.replace(minusSign, '-')}${parts.unit.replace('µ', 'u')}`
 }
+
+const whole = new Intl.NumberFormat('en', { maximumFractionDigits: 0 })
+
+/** A count, rounded, its thousands set apart: 30,001. */
+export function formatCount(value: number): string {
+  return whole.format(value)
+}

@@ -130,16 +130,16 @@ describe('failure is data', () => {
     [1, -1],
     [1, 1e-9],
   ])('for a duration of %d and a sample interval of %d', (duration, sampleInterval) => {
-    const { status, failure } = simulate(makeCircuit(), { stimulus: fromOffset, duration, sampleInterval })
+    const { status, reason } = simulate(makeCircuit(), { stimulus: fromOffset, duration, sampleInterval })
     expect(status).toBe('failed')
-    expect(failure).toMatchObject({ kind: 'invalid', path: [expect.anything(), expect.anything()] })
+    expect(reason).toMatchObject({ kind: 'invalid', path: [expect.anything(), expect.anything()] })
   })
 
   it('for an amplifier too fast to follow, at once', () => {
-    const { status, failure, cost, vo } = runOf(makeCircuit({ amplifier: { gainBandwidth: 1e9 } }))
+    const { status, reason, cost, vo } = runOf(makeCircuit({ amplifier: { gainBandwidth: 1e9 } }))
     expect(status).toBe('failed')
-    expect(failure).toMatchObject({ kind: 'solver', path: ['circuit', 'amplifier', 'gainBandwidth'] })
-    expect(failure!.sentence).toMatch(/too fast to follow/)
+    expect(reason).toMatchObject({ kind: 'solver', path: ['circuit', 'amplifier', 'gainBandwidth'] })
+    expect(reason!.sentence).toMatch(/too fast to follow/)
     expect(cost.evaluations).toBe(0)
     expect(vo).toHaveLength(0)
   })

@@ -2,7 +2,7 @@
 import type { View, WaveformSeries } from '#client/components/charts/chart-types.ts'
 import { valueAt } from '#client/components/charts/cursor-readings.ts'
 import { samplesWithin } from '#client/components/charts/decimate.ts'
-import { formatQuantity } from '#shared/units/format.ts'
+import { formatCount, formatQuantity } from '#shared/units/format.ts'
 
 export interface PlotTable {
   columns: string[]
@@ -20,8 +20,6 @@ const ordinalEnd = (n: number) => {
   if (tens > 10 && tens < 14) return 'th'
   return ['th', 'st', 'nd', 'rd'][n % 10] ?? 'th'
 }
-const count = new Intl.NumberFormat('en')
-
 export function waveformTable(
   series: readonly WaveformSeries[],
   sampleInterval: number,
@@ -44,7 +42,7 @@ export function waveformTable(
   }
   const note =
     step === 1
-      ? `All ${count.format(within)} samples of the visible span.`
-      : `Every ${step}${ordinalEnd(step)} of the ${count.format(within)} samples of the visible span; the CSV file has them all.`
+      ? `All ${formatCount(within)} samples of the visible span.`
+      : `Every ${step}${ordinalEnd(step)} of the ${formatCount(within)} samples of the visible span; the CSV file has them all.`
   return { columns: ['time', ...series.map((one) => one.label)], rows, note }
 }

@@ -8,15 +8,13 @@ import { classNames } from '#client/components/ui/class-names.ts'
 import { EmptyState } from '#client/components/ui/empty-state.tsx'
 import { Notice } from '#client/components/ui/notice.tsx'
 import type { LiveResult } from '#client/lib/live-result.ts'
-import { formatPercent, formatQuantity } from '#shared/units/format.ts'
+import { formatCount, formatPercent, formatQuantity } from '#shared/units/format.ts'
 import type { Simulation } from '#sim/types.ts'
 
 export interface RecordFrameProps {
   live: LiveResult
   children: (simulation: Simulation) => ReactNode
 }
-
-const count = new Intl.NumberFormat('en')
 
 function Progress({ done, onCancel }: { done: number; onCancel?: () => void }) {
   return (
@@ -55,7 +53,7 @@ function StatusLine({ live }: { live: LiveResult }) {
       {!stale && progress === null && simulation && (
         <span>
           Record of {formatQuantity((simulation.vo.length - 1) * simulation.sampleInterval, 's')} from
-          power-on: {count.format(simulation.vo.length)} samples, one every{' '}
+          power-on: {formatCount(simulation.vo.length)} samples, one every{' '}
           {formatQuantity(simulation.sampleInterval, 's')}
         </span>
       )}

@@ -5,14 +5,12 @@ import { Select } from '#client/components/ui/select.tsx'
 import type { Playhead } from '#client/features/runs/hooks/use-playhead.ts'
 import { limitSentences } from '#client/features/runs/lib/limit-sentences.ts'
 import type { RunModeSpan } from '#shared/schemas/run.ts'
-import { formatQuantity } from '#shared/units/format.ts'
-
-const count = new Intl.NumberFormat('en', { maximumFractionDigits: 0 })
+import { formatCount, formatQuantity } from '#shared/units/format.ts'
 
 /** How much slower than life, in words. */
 function pace(speed: number): string {
   const amount = `${formatQuantity(speed, 's')} of record per second`
-  return speed < 1 ? `${amount}, ${count.format(1 / speed)} × slower` : amount
+  return speed < 1 ? `${amount}, ${formatCount(1 / speed)} × slower` : amount
 }
 
 export interface PlayheadBarProps {

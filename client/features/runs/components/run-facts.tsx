@@ -1,8 +1,6 @@
 import { formatMoment } from '#client/lib/dates.ts'
 import type { Run } from '#shared/schemas/run.ts'
-import { formatQuantity } from '#shared/units/format.ts'
-
-const count = new Intl.NumberFormat('en')
+import { formatCount, formatQuantity } from '#shared/units/format.ts'
 
 /** Who saved the run, when, with which engine, and its note. */
 export function RunFacts({ run }: { run: Run }) {
@@ -14,7 +12,7 @@ export function RunFacts({ run }: { run: Run }) {
     ['Engine', run.engineVersion],
     [
       'Record',
-      `${duration}, ${count.format(samples)} samples, one every ${formatQuantity(sampleInterval, 's')}`,
+      `${duration}, ${formatCount(samples)} samples, one every ${formatQuantity(sampleInterval, 's')}`,
     ],
   ] as const
   return (

@@ -7,12 +7,15 @@
  * (L. Carlà, American Journal of Physics 81, 2013, doi 10.1119/1.4802873, for the two ways of losing heat). One
  * temperature for the whole filament.
  */
+import { limits } from '#shared/limits.ts'
 import type { AmplitudeControl, Circuit } from '#shared/schemas/circuit.ts'
 import type { GainPath } from '#sim/circuit/gain-path.ts'
 
 type Lamp = Extract<AmplitudeControl, { kind: 'lamp' }>
 
 const tungstenExponent = 1.2
+/** K; no filament that the schema accepts is colder. */
+const leastTemperature = limits.temperature[0]
 
 export class LampPath implements GainPath {
   readonly state: { name: string; unit: string; initial: number }
@@ -30,9 +33,13 @@ export class LampPath implements GainPath {
     this.smallSignal = { feedbackR: gain.feedbackR, groundR: this.resistance(lamp.ambientTemperature) }
   }
 
-  /** Ω at `temperature` (K). */
+  /**
+   * Ω at `temperature` (K). An integrator may try a step so long that it would cool the filament below zero; the law is
+   * held at 1 K there, so that the trial has a finite error and is rejected.
+   */
   resistance(temperature: number): number {
-    return this.lamp.coldR * Math.pow(temperature / this.lamp.coldTemperature, this.exponent)
+    const warm = Math.max(leastTemperature, temperature)
+    return this.lamp.coldR * Math.pow(warm / this.lamp.coldTemperature, this.exponent)
   }
   invertingInput(vo: number, temperature: number): number {
     const resistance = this.resistance(temperature)

@@ -50,6 +50,19 @@ describe('simulate', () => {
     for (let n = 1; n < modes.length; n++) expect(modes[n]!.start).toBe(modes[n - 1]!.end)
   })
 
+  it('follows a filament far faster than the loop, whose first trial step is much too long', () => {
+    const lamp = { ...quickLamp, thermalCapacity: 8e-11 } as Circuit['amplitudeControl']
+    const circuit = makeCircuit({
+      network: { seriesR: 1e6, shuntR: 1e6 },
+      gain: { feedbackR: 430, groundR: 150 },
+      amplifier: { gainBandwidth: 5e3, slewRate: 1e4 },
+      amplitudeControl: lamp,
+    })
+    const { status, control } = run(circuit, 5e-3, { kind: 'kick', voltage: 2 }, 0.1e-3)
+    expect(status).toBe('complete')
+    expect(Math.min(...control!.values)).toBeGreaterThan(299.999)
+  })
+
   it('never leaves the rails and lies on them while held', () => {
     const { vo, modes, sampleInterval } = run(makeCircuit({ supply: { positive: 8, negative: 10 } }))
     expect(Math.max(...vo)).toBeLessThanOrEqual(6.5 + 1e-12)

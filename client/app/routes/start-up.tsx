@@ -5,5 +5,5 @@ import { StartUpPage } from '#client/features/start-up/index.ts'
 
 export function Component() {
   const { content, live } = useOutletContext<Sheet>()
-  return <StartUpPage control={content.circuit.amplitudeControl.kind} live={live} />
+  return <StartUpPage circuit={content.circuit} live={live} />
 }

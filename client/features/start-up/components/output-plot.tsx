@@ -17,6 +17,8 @@ import type { Simulation } from '#sim/types.ts'
 
 export interface OutputPlotProps {
   simulation: Simulation
+  /** A single supply's reference, V above the negative rail; volts can then be shown from either. */
+  reference: number | undefined
   spans: readonly LimitSpan[]
   view: View
   onViewChange: (view: View) => void
@@ -24,14 +26,16 @@ export interface OutputPlotProps {
   onCursorsChange: (cursors: Cursors) => void
 }
 
-export function OutputPlot({ simulation, spans, ...rest }: OutputPlotProps) {
+export function OutputPlot({ simulation, reference, spans, ...rest }: OutputPlotProps) {
   const { sampleInterval, figures, control } = simulation
   const { view, onViewChange, cursors } = rest
   const [choice, setChoice] = useState<SeriesChoice>({ node: false, control: false })
+  const [fromRail, setFromRail] = useState(false)
   const [saving, setSaving] = useState(false)
-  const series = useMemo(() => startUpSeries(simulation, choice), [simulation, choice])
+  const lift = fromRail ? (reference ?? 0) : 0
+  const series = useMemo(() => startUpSeries(simulation, choice, lift), [simulation, choice, lift])
   const overview = useMemo(() => startUpSeries(simulation, { node: false, control: false }), [simulation])
-  const envelope = useMemo(() => envelopeLine(simulation.envelope), [simulation.envelope])
+  const envelope = useMemo(() => envelopeLine(simulation.envelope, lift), [simulation.envelope, lift])
   const whole = wholeView(overview, sampleInterval)
   const timeTo90 = figures?.timeTo90 ?? null
   const marks = useMemo(
@@ -88,6 +92,13 @@ export function OutputPlot({ simulation, spans, ...rest }: OutputPlotProps) {
             label={control.name}
             checked={choice.control}
             onChange={(event) => setChoice({ ...choice, control: event.target.checked })}
+          />
+        )}
+        {reference !== undefined && (
+          <Checkbox
+            label="Volts from the negative rail"
+            checked={fromRail}
+            onChange={(event) => setFromRail(event.target.checked)}
           />
         )}
         <PlotHints view={view} whole={whole} onViewChange={onViewChange} />

@@ -12,21 +12,22 @@ import { closeUp } from '#client/features/start-up/lib/close-up.ts'
 import { growthStory } from '#client/features/start-up/lib/growth-story.ts'
 import { modeShares } from '#client/features/start-up/lib/mode-shares.ts'
 import type { LiveResult } from '#client/lib/live-result.ts'
-import type { AmplitudeControl } from '#shared/schemas/circuit.ts'
+import type { AmplitudeControl, Circuit } from '#shared/schemas/circuit.ts'
 import type { Simulation, SmallSignal } from '#sim/types.ts'
 
 export interface StartUpPageProps {
-  control: AmplitudeControl['kind']
+  circuit: Circuit
   live: LiveResult
 }
 
 interface StartUpRecordProps {
   control: AmplitudeControl['kind']
+  reference: number | undefined
   smallSignal: SmallSignal | null
   simulation: Simulation
 }
 
-function StartUpRecord({ control, smallSignal, simulation }: StartUpRecordProps) {
+function StartUpRecord({ control, reference, smallSignal, simulation }: StartUpRecordProps) {
   const { figures, sampleInterval } = simulation
   const end = (simulation.vo.length - 1) * sampleInterval
   const { view, setView, cursors, setCursors } = useLiveView(end, sampleInterval)
@@ -36,7 +37,7 @@ function StartUpRecord({ control, smallSignal, simulation }: StartUpRecordProps)
   return (
     <div className="space-y-4">
       <OutputPlot
-        {...{ simulation, spans, view, cursors }}
+        {...{ simulation, reference, spans, view, cursors }}
         onViewChange={setView}
         onCursorsChange={setCursors}
       />
@@ -52,10 +53,17 @@ function StartUpRecord({ control, smallSignal, simulation }: StartUpRecordProps)
   )
 }
 
-export function StartUpPage({ control, live }: StartUpPageProps) {
+export function StartUpPage({ circuit, live }: StartUpPageProps) {
   return (
     <RecordFrame live={live}>
-      {(simulation) => <StartUpRecord {...{ control, simulation }} smallSignal={live.smallSignal} />}
+      {(simulation) => (
+        <StartUpRecord
+          control={circuit.amplitudeControl.kind}
+          reference={circuit.supply.reference}
+          simulation={simulation}
+          smallSignal={live.smallSignal}
+        />
+      )}
     </RecordFrame>
   )
 }

@@ -8,11 +8,28 @@ export interface SeriesChoice {
   control: boolean
 }
 
-/** Output, then the network node and the amplitude control's own state where they are chosen and exist. */
-export function startUpSeries({ vo, v1, control }: Simulation, choice: SeriesChoice): WaveformSeries[] {
-  const series: WaveformSeries[] = [{ key: 'vo', label: 'output', unit: 'V', values: vo, color: 'petrol' }]
+/**
+ * Output, then the network node and the amplitude control's own state where they are chosen and exist.
+ * @param lift what is added to every voltage, V: the reference, where volts are shown from the negative rail
+ */
+export function startUpSeries(
+  { vo, v1, control }: Simulation,
+  choice: SeriesChoice,
+  lift = 0,
+): WaveformSeries[] {
+  const lifted = (volts: Float64Array) => (lift === 0 ? volts : volts.map((value) => value + lift))
+  const series: WaveformSeries[] = [
+    { key: 'vo', label: 'output', unit: 'V', values: lifted(vo), color: 'petrol' },
+  ]
   if (choice.node)
-    series.push({ key: 'v1', label: 'network node', unit: 'V', values: v1, color: 'plum', dash: [5, 3] })
+    series.push({
+      key: 'v1',
+      label: 'network node',
+      unit: 'V',
+      values: lifted(v1),
+      color: 'plum',
+      dash: [5, 3],
+    })
   if (choice.control && control)
     series.push({
       key: 'control',

@@ -4,6 +4,8 @@ import { createMemoryRouter, RouterProvider } from 'react-router-dom'
 import { describe, expect, it, vi } from 'vitest'
 import { StartUpPage } from '#client/features/start-up/index.ts'
 import type { LiveResult } from '#client/lib/live-result.ts'
+import type { Supply } from '#shared/schemas/circuit.ts'
+import { startingDraft } from '#shared/starting-draft.ts'
 import { computed, nothingYet } from '#tests/client/components/charts/support/live.ts'
 
 // The canvas has a test of its own.
@@ -11,10 +13,11 @@ vi.mock('#client/components/charts/waveform-canvas.tsx', () => ({ WaveformCanvas
 
 const clipping = computed(21.5e3, 30e-3)
 
-function renderPage(live: LiveResult, address = '/') {
-  const router = createMemoryRouter([{ path: '*', element: <StartUpPage control="none" live={live} /> }], {
-    initialEntries: [address],
-  })
+const { circuit } = startingDraft
+
+function renderPage(live: LiveResult, address = '/', supply: Supply = circuit.supply) {
+  const page = <StartUpPage circuit={{ ...circuit, supply }} live={live} />
+  const router = createMemoryRouter([{ path: '*', element: page }], { initialEntries: [address] })
   render(<RouterProvider router={router} />)
   return { router, chart: () => screen.getByRole('application', { name: /^Output from power-on/ }) }
 }
@@ -49,6 +52,26 @@ describe('StartUpPage', () => {
     expect(within(table).queryByRole('row', { name: /^network node/ })).toBeNull()
     await user.click(screen.getByRole('checkbox', { name: 'Network node' }))
     expect(within(table).getByRole('row', { name: /^network node .*V/u })).toBeVisible()
+  })
+
+  it('counts volts from the reference of a single supply or from its negative rail', async () => {
+    const user = userEvent.setup()
+    renderPage(clipping, '/?c1=0.012', { positive: 9, negative: 9, reference: 9 })
+    const output = () => {
+      const row = within(screen.getByRole('table', { name: 'Cursor read-outs' })).getByRole('row', {
+        name: /^output/,
+      })
+      const [volts = ''] = /[−\d.]+(?=\sV)/u.exec(row.textContent) ?? []
+      return Number(volts.replace('−', '-'))
+    }
+    const fromReference = output()
+    await user.click(screen.getByRole('checkbox', { name: 'Volts from the negative rail' }))
+    expect(output() - fromReference).toBeCloseTo(9, 3)
+  })
+
+  it('offers no other zero where the supply is split', () => {
+    renderPage(clipping)
+    expect(screen.queryByRole('checkbox', { name: 'Volts from the negative rail' })).toBeNull()
   })
 
   it('saves the visible span as CSV', async () => {

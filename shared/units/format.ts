@@ -35,10 +35,16 @@ function withSign(text: string, signed: boolean): string {
   return signed ? `+${text}` : text
 }
 
+/** From here on thousands are set apart. */
+const grouped = new Intl.NumberFormat('en', { maximumFractionDigits: 0 })
+const leastGrouped = 1e4
+
 /** Rounds to `digits` significant digits without exponent and without trailing zeros after the point. */
 function plain(value: number, digits: number): string {
-  const text = Number(value.toPrecision(digits)).toString()
-  return text.includes('e') ? value.toExponential(digits - 1) : text
+  const rounded = Number(value.toPrecision(digits))
+  const text = rounded.toString()
+  if (text.includes('e')) return value.toExponential(digits - 1)
+  return Math.abs(rounded) >= leastGrouped && Number.isInteger(rounded) ? grouped.format(rounded) : text
 }
 
 /**
@@ -93,9 +99,7 @@ export function formatInput(value: number, digits = 6): string {
   return `${parts.number.replace(minusSign, '-')}${parts.unit.replace('µ', 'u')}`
 }
 
-const whole = new Intl.NumberFormat('en', { maximumFractionDigits: 0 })
-
 /** A count, rounded, its thousands set apart: 30,001. */
 export function formatCount(value: number): string {
-  return whole.format(value)
+  return grouped.format(value)
 }

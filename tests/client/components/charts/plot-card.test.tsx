@@ -65,6 +65,6 @@ describe('PolePlot', () => {
       /Poles at \+61\.7\s1\/s ± j6\.221\skrad\/s; right of the axis/u,
     )
     expect(container.querySelectorAll('[data-pole="grows"]')).toHaveLength(2)
-    expect(screen.getByText(/2080000\s1\/s: too fast to matter/u)).toBeVisible()
+    expect(screen.getByText(/2,080,000\s1\/s: too fast to matter/u)).toBeVisible()
   })
 })

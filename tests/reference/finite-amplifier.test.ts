@@ -40,6 +40,12 @@ describe('equal arms with an integrator amplifier', () => {
     },
   )
 
+  it('gives the margin of a gain over that threshold', () => {
+    // K = 3.0478 at f0/ft = 0.05: a gain of 3.2 has 3.2/3.0478 − 1 = 4.994 %, not the 6.667 % over an ideal 3.
+    const { gainMargin } = smallSignal(withGain(integrator(idealFrequency / 0.05), 3.2))
+    expect(Math.abs(gainMargin - 0.04994)).toBeLessThan(2e-5)
+  })
+
   // First order in f0/ft (textbook phase argument: lag A·f/GBW against a network slope of −2/3): −4.5·f0/GBW.
   it('shifts by −4.5·f0/ft while that is small', () => {
     const ratio = 1e-5

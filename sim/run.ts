@@ -1,5 +1,7 @@
 /** From a run's inputs, as stored or typed, to its simulation. */
+import { issuePath } from '#shared/schemas/issue-path.ts'
 import { runInputsSchema } from '#shared/schemas/simulation.ts'
+import { invalid } from '#sim/failures.ts'
 import { plan } from '#sim/plan.ts'
 import { simulate } from '#sim/simulate.ts'
 import type { Failure, SimulateOptions, Simulation } from '#sim/types.ts'
@@ -15,8 +17,7 @@ export function simulateRun(inputs: unknown, hooks: RunHooks = {}): Simulation |
   const parsed = runInputsSchema.safeParse(inputs)
   if (!parsed.success) {
     const issue = parsed.error.issues[0]!
-    const path = issue.path.map((part) => (typeof part === 'symbol' ? String(part) : part))
-    return { kind: 'invalid', path, sentence: issue.message }
+    return invalid(issuePath(issue), issue.message)
   }
   const { circuit, stimulus, timing } = parsed.data
   const grid = plan(circuit, timing, stimulus)

@@ -1,24 +1,21 @@
 /** The words of the engine's public face. Results are structured-cloneable; SI units throughout. */
 import type { Figures } from '#shared/figures.ts'
+import type { RunModeSpan } from '#shared/schemas/run.ts'
 import type { Stimulus } from '#shared/schemas/stimulus.ts'
 
 export type { Circuit } from '#shared/schemas/circuit.ts'
 export type { Ramp, Stimulus } from '#shared/schemas/stimulus.ts'
 
 /** What governs the output at an instant: the loop, the slew limit, or a rail. */
-export type Mode = 'linear' | 'slewUp' | 'slewDown' | 'heldHigh' | 'heldLow'
+export type Mode = RunModeSpan['mode']
 
 export interface Complex {
   re: number
   im: number
 }
 
-/** A stretch of time in one mode, seconds from power-on. */
-export interface ModeSpan {
-  mode: Mode
-  start: number
-  end: number
-}
+/** A stretch of time in one mode, seconds from power-on: stored with a run as it is. */
+export type ModeSpan = RunModeSpan
 
 export interface SmallSignal {
   /** 1 + Rf/Rg at zero signal, device cold. */

@@ -1,6 +1,7 @@
 import type { Request } from 'express'
 import type { z } from 'zod'
 import { invalid, notFound } from '#server/http/errors.ts'
+import { issuePath } from '#shared/schemas/issue-path.ts'
 
 /** The request's JSON body as `schema` understands it; 422 with a sentence per field otherwise. */
 export function readBody<Schema extends z.ZodType>(request: Request, schema: Schema): z.output<Schema> {
@@ -23,9 +24,9 @@ function parse<Schema extends z.ZodType>(schema: Schema, input: unknown): z.outp
   const parsed = schema.safeParse(input)
   if (parsed.success) return parsed.data
   throw invalid(
-    parsed.error.issues.map(({ path, message }) => ({
-      path: path.map((part) => (typeof part === 'symbol' ? String(part) : part)),
-      message,
+    parsed.error.issues.map((issue) => ({
+      path: issuePath(issue),
+      message: issue.message,
     })),
   )
 }

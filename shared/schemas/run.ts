@@ -25,7 +25,10 @@ export const listRunsSchema = z.strictObject({
   sort: z.enum(['title', 'design', 'author', 'createdAt']).default('createdAt'),
 })
 
-/** What governs the output during a span, seconds from power-on; the engine's own words. */
+/**
+ * What governs the output during a span, seconds from power-on: the loop, the slew limit, or a rail. The engine's words
+ * are these.
+ */
 export interface RunModeSpan {
   mode: 'linear' | 'slewUp' | 'slewDown' | 'heldHigh' | 'heldLow'
   start: number

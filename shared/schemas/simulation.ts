@@ -3,6 +3,7 @@ import { limits } from '#shared/limits.ts'
 import { circuitSchema } from '#shared/schemas/circuit.ts'
 import { quantity } from '#shared/schemas/quantity.ts'
 import { stimulusSchema } from '#shared/schemas/stimulus.ts'
+import { seriesNames } from '#shared/units/preferred-series.ts'
 
 /** The grid of a record as a person states it; null leaves the choice to the engine (`sim/plan.ts`). Seconds. */
 export const timingSchema = z.strictObject({
@@ -22,7 +23,7 @@ export const draftContentSchema = runInputsSchema.extend({
   /** Whether the two R and the two C are edited as one. */
   ganged: z.boolean(),
   /** Preferred series that the arrow keys step along (IEC 60063). */
-  series: z.enum(['E6', 'E12', 'E24', 'E48', 'E96', 'E192']),
+  series: z.enum(seriesNames),
   /** Key of the amplifier class that the figures were taken from, null once edited by hand. */
   amplifierClass: z.string().max(40).nullable(),
 })

@@ -3,10 +3,12 @@ import { formatQuantity } from '#shared/units/format.ts'
 import type { MotionOutcome } from '#sim/modes/machine.ts'
 import type { Failure } from '#sim/types.ts'
 
+/** Inputs that are refused: the field at fault as a path within `RunInputs`, and a sentence for it. */
 export function invalid(path: (string | number)[], sentence: string): Failure {
   return { kind: 'invalid', path, sentence }
 }
 
+/** The caller asked to stop. */
 export const stoppedFailure: Failure = {
   kind: 'stopped',
   path: [],

@@ -7,8 +7,8 @@ import type { Circuit } from '#shared/schemas/circuit.ts'
 import type { Timing } from '#shared/schemas/simulation.ts'
 import type { Stimulus } from '#shared/schemas/stimulus.ts'
 import { formatCount, formatQuantity } from '#shared/units/format.ts'
-import { naturalRate } from '#sim/circuit/loop-polynomial.ts'
-import { railsUp } from '#sim/circuit/rails.ts'
+import { naturalPeriod } from '#sim/circuit/loop-polynomial.ts'
+import { outputReach, railsUp } from '#sim/circuit/rails.ts'
 import { invalid } from '#sim/failures.ts'
 import { settlingTime } from '#sim/settling-time.ts'
 import { smallSignal } from '#sim/small-signal.ts'
@@ -62,7 +62,7 @@ function decimal(step: number, exponent: number): number {
 
 /** Period that the loop oscillates with, about; the network's own where the loop does not ring. s. */
 function expectedPeriod(circuit: Circuit, linear: SmallSignal): number {
-  const own = (2 * Math.PI) / naturalRate(circuit.network)
+  const own = naturalPeriod(circuit.network)
   return linear.frequency > 0 ? Math.max(own, 1 / linear.frequency) : own
 }
 
@@ -73,13 +73,15 @@ function showingTime(circuit: Circuit, stimulus: Stimulus, linear: SmallSignal):
   const after = railsUp(stimulus)
   if (!linear.starts)
     return after + Math.max(shortest, decaysShown / Math.max(-linear.growthRate, Number.MIN_VALUE))
-  const { supply, amplifier } = circuit
-  const rail = Math.min(supply.positive - amplifier.headroomHigh, supply.negative - amplifier.headroomLow)
-  const growth = Math.log(Math.max(1, rail / startLevel(circuit, stimulus, linear.gain))) / linear.growthRate
+  const { high, low } = outputReach(circuit)
+  const growth =
+    Math.log(Math.max(1, Math.min(high, low) / startLevel(circuit, stimulus, linear.gain))) /
+    linear.growthRate
   const settling = growth + settlingTime(circuit, linear)
   return after + Math.max(shortest, settling + Math.max(settledPeriods * period, settledShare * settling))
 }
 
+/** The duration that a person who states none gets, s: as showing and as affordable as can be. */
 function automaticDuration(circuit: Circuit, stimulus: Stimulus, linear: SmallSignal): number {
   const period = expectedPeriod(circuit, linear)
   const most = Math.min(
@@ -95,6 +97,7 @@ function automaticDuration(circuit: Circuit, stimulus: Stimulus, linear: SmallSi
   return wished > allowed && allowed > fewestPeriods * period ? roundedDown(allowed, durationSteps) : wished
 }
 
+/** The sample interval that a person who states none gets, s; a round one that keeps the record storable. */
 function automaticInterval(period: number, duration: number): number {
   const wished = roundedDown(Math.min(period / samplesPerPeriod, duration), intervalSteps)
   const coarsest = duration / (limits.storedSamples - 1)
@@ -104,6 +107,7 @@ function automaticInterval(period: number, duration: number): number {
 /**
  * The grid for a circuit and stimulus.
  * @param timing seconds, null where the engine is to choose
+ * @returns the grid, or a failure of kind `invalid` at the field of `timing` that can mend it
  */
 export function plan(circuit: Circuit, timing: Timing, stimulus: Stimulus): Plan | Failure {
   const linear = smallSignal(circuit)

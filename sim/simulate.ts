@@ -2,15 +2,15 @@
 import type { Circuit } from '#shared/schemas/circuit.ts'
 import { limits } from '#shared/limits.ts'
 import { fastestRate } from '#sim/circuit/fastest-rate.ts'
-import { naturalRate } from '#sim/circuit/loop-polynomial.ts'
+import { naturalPeriod } from '#sim/circuit/loop-polynomial.ts'
 import { Plant } from '#sim/circuit/plant.ts'
-import { railPieces } from '#sim/circuit/rails.ts'
+import { outputReach, railPieces } from '#sim/circuit/rails.ts'
 import { invalid, solverFailure, stoppedFailure, tooStiff } from '#sim/failures.ts'
 import { figuresOf } from '#sim/figures.ts'
-import { Machine, type Observer } from '#sim/modes/machine.ts'
+import { Machine, type Observer, type Position } from '#sim/modes/machine.ts'
 import { stableReach, WorkMeter } from '#sim/ode/integrate.ts'
 import { Columns } from '#sim/record/columns.ts'
-import { Cycles } from '#sim/record/cycles.ts'
+import { Cycles, type Cycle } from '#sim/record/cycles.ts'
 import { Spans } from '#sim/record/spans.ts'
 import { measureSettled, type SettledMeasurement } from '#sim/settled/measure.ts'
 import { cutsPerPeriod } from '#sim/settled/steadiness.ts'
@@ -23,7 +23,7 @@ import { mostEvaluations, predictedEvaluations } from '#sim/work.ts'
 /** Error per step relative to the amplitude, and the same while a stiff amplifier keeps the steps short anyway. */
 const tolerance = 1e-10
 const stiffTolerance = 1e-7
-/** Longest integration step as a share of 1/ω0 · 2π. */
+/** Fewest integration steps in a period 2π/ω0: the longest step is this share of it. */
 const stepsPerPeriod = 8
 /** First step after a mode change, in time constants of the fastest pole. */
 const firstStepShare = 0.5
@@ -51,6 +51,21 @@ function isLinear({ shares }: SettledMeasurement): boolean {
   return Object.values(shares).every((share) => share === 0)
 }
 
+/** What the motion settles to, measured from the record's end; null while it has not settled. */
+function settledOf(
+  circuit: Circuit,
+  machine: Machine,
+  end: Position,
+  cycles: readonly Cycle[],
+): SettledMeasurement | null {
+  if (!swings(cycles, machine.settings.scale)) return null
+  const cuts = cutsPerPeriod(cycles)
+  if (cuts === null) return null
+  const last = cycles.at(-1)!
+  const settled = measureSettled(machine, end, cuts, last.end - last.start)
+  return settled && circuit.amplitudeControl.kind === 'none' && isLinear(settled) ? null : settled
+}
+
 /** The first of the options that no computation can work with, or null. */
 function optionFault({ duration, sampleInterval }: SimulateOptions): Failure | null {
   if (!(duration > 0 && Number.isFinite(duration)))
@@ -62,6 +77,7 @@ function optionFault({ duration, sampleInterval }: SimulateOptions): Failure | n
   return null
 }
 
+/** What a simulation that never began gives back. */
 function emptySimulation(options: SimulateOptions, reason: Failure): Simulation {
   const none = () => new Float64Array(0)
   return {
@@ -80,11 +96,12 @@ function emptySimulation(options: SimulateOptions, reason: Failure): Simulation 
   }
 }
 
+/** The mode machine with its tolerances and step lengths for this circuit and stimulus. */
 function machineFor(circuit: Circuit, options: SimulateOptions, linear: SmallSignal): Machine {
   const plant = new Plant(circuit)
-  const { supply, amplifier, network } = circuit
-  const scale = Math.max(supply.positive - amplifier.headroomHigh, supply.negative - amplifier.headroomLow)
-  const period = (2 * Math.PI) / naturalRate(network)
+  const reach = outputReach(circuit)
+  const scale = Math.max(reach.high, reach.low)
+  const period = naturalPeriod(circuit.network)
   const fastest = Math.max(fastestRate(circuit, linear), 1 / period)
   const volts = Math.min(scale, startLevel(circuit, options.stimulus, linear.gain))
   return new Machine({
@@ -128,13 +145,7 @@ export function simulate(circuit: Circuit, options: SimulateOptions): Simulation
   spans.close()
 
   const complete = outcome === 'reachedEnd'
-  let settled: SettledMeasurement | null = null
-  if (complete && linear.starts && swings(cycles.list, machine.settings.scale)) {
-    const cuts = cutsPerPeriod(cycles.list)
-    const last = cycles.list.at(-1)!
-    if (cuts !== null) settled = measureSettled(machine, position, cuts, last.end - last.start)
-    if (settled && circuit.amplitudeControl.kind === 'none' && isLinear(settled)) settled = null
-  }
+  const settled = complete && linear.starts ? settledOf(circuit, machine, position, cycles.list) : null
   const ending = {
     circuit,
     stimulus: options.stimulus,

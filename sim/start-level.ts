@@ -6,7 +6,8 @@ const least = 1e-9
 
 /**
  * About the amplitude at the output with which the oscillation begins, V. For rest with the amplifier's offset Vos it is
- * K²·Vos·√(RpCs/(RsCp)), K the closed-loop gain; for a kick, the kick times K.
+ * K²·Vos·√(RpCs/(RsCp)), K the closed-loop gain: twice the residue of the ideal loop's step response at its growing pole,
+ * near the critical gain. For a kick, the kick times K.
  */
 export function startLevel({ network, amplifier }: Circuit, stimulus: Stimulus, gain: number): number {
   const { seriesR, seriesC, shuntR, shuntC } = network

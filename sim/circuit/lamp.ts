@@ -13,7 +13,8 @@ import type { GainPath } from '#sim/circuit/gain-path.ts'
 
 type Lamp = Extract<AmplitudeControl, { kind: 'lamp' }>
 
-const tungstenExponent = 1.2
+/** Of R(T) where the circuit states none. */
+export const tungstenExponent = 1.2
 /** K; no filament that the schema accepts is colder. */
 const leastTemperature = limits.temperature[0]
 

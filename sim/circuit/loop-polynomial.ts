@@ -10,7 +10,7 @@
 import type { Circuit, Network } from '#shared/schemas/circuit.ts'
 import type { Cubic } from '#sim/linalg/cubic.ts'
 
-export interface Loop {
+interface Loop {
   /** 1/√(RsRpCsCp), rad/s. */
   naturalRate: number
   /** a1·ω0. */
@@ -23,11 +23,17 @@ export interface Loop {
   leak: number
 }
 
-/** 1/√(RsRpCsCp), rad/s. */
+/** Angular frequency ω0 of the network: 1/√(RsRpCsCp), rad/s. Two roots, so that no product overflows. */
 export function naturalRate({ seriesR, seriesC, shuntR, shuntC }: Network): number {
   return 1 / (Math.sqrt(seriesR * seriesC) * Math.sqrt(shuntR * shuntC))
 }
 
+/** Period of the network's own frequency, 2π/ω0, s. */
+export function naturalPeriod(network: Network): number {
+  return (2 * Math.PI) / naturalRate(network)
+}
+
+/** The loop's coefficients in units of ω0, from the circuit's parts. */
 export function loopOf({ network, amplifier }: Circuit): Loop {
   const { seriesR, seriesC, shuntR, shuntC } = network
   const rate = naturalRate(network)

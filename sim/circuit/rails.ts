@@ -6,7 +6,7 @@ import type { Circuit } from '#shared/schemas/circuit.ts'
 import type { Ramp, Stimulus } from '#shared/schemas/stimulus.ts'
 
 /** A rail's magnitude over one piece: `level` (V) at the piece's start, `slope` in V/s, never negative. */
-export interface RailLine {
+interface RailLine {
   level: number
   slope: number
 }
@@ -22,6 +22,11 @@ export interface RailPiece {
 /** Magnitude at `t`, V. */
 export function railAt(piece: RailPiece, line: RailLine, t: number): number {
   return line.slope === 0 ? line.level : line.level + line.slope * (t - piece.start)
+}
+
+/** How far the output reaches from the reference once the supplies are up, V either way. */
+export function outputReach({ supply, amplifier }: Circuit): { high: number; low: number } {
+  return { high: supply.positive - amplifier.headroomHigh, low: supply.negative - amplifier.headroomLow }
 }
 
 /** One rail as corner points: zero until the supply exceeds the headroom, then straight up to its full value. */

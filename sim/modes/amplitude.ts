@@ -20,6 +20,7 @@ export class Amplitude {
     this.previous = [...least]
   }
 
+  /** Takes in the state `y` at `t` s; times come in order. */
   note(t: number, y: readonly number[]): void {
     if (t > this.windowEnd) {
       this.windowEnd = t + this.window
@@ -31,6 +32,7 @@ export class Amplitude {
     for (let i = 0; i < y.length; i++) this.present[i] = Math.max(this.present[i]!, Math.abs(y[i]!))
   }
 
+  /** Present size of one state, in its unit; never below its least. */
   size(index: number): number {
     return Math.max(this.present[index]!, this.previous[index]!)
   }

@@ -90,7 +90,6 @@ export class Machine {
       const piece = this.pieceAt(position.t)
       const until = Math.min(end, piece.end, position.t + periodsPerSetting * period)
       const { outcome, firing } = this.runMode(position, piece, until, observers)
-      if (outcome === 'stopped') return outcome
       if (outcome !== 'reachedEnd') return outcome
       if (firing) position.mode = nextMode(firing.guard.limit)
       else if (until === end) break

@@ -20,11 +20,12 @@ export interface Guard {
   limit: Limit
 }
 
-export type Limit = 'highRail' | 'lowRail' | 'slewUp' | 'slewDown' | 'release'
+type Limit = 'highRail' | 'lowRail' | 'slewUp' | 'slewDown' | 'release'
 
 /** Rounding of guards, relative to what they compare. */
 const guardRounding = 1e-12
 
+/** `value` brought within ±`limit`. */
 function clamp(value: number, limit: number): number {
   return Math.max(-limit, Math.min(limit, value))
 }
@@ -41,7 +42,7 @@ export function modeAt(plant: Plant, piece: RailPiece, t: number, y: readonly nu
 }
 
 /** Slope that the mode imposes on the output, V/s; null in the linear mode. */
-export function imposedSlope(plant: Plant, piece: RailPiece, mode: Mode): number | null {
+function imposedSlope(plant: Plant, piece: RailPiece, mode: Mode): number | null {
   switch (mode) {
     case 'linear':
       return null

@@ -23,6 +23,7 @@ export class Stretch {
     this.state = new Array<number>(dimension).fill(0)
   }
 
+  /** The step from `from` to `to` (s), with the state at its end. */
   set(mode: Mode, from: number, to: number, end: readonly number[], dense: Dense): void {
     this.mode = mode
     this.from = from
@@ -44,18 +45,20 @@ export class Stretch {
   }
 }
 
+/** A guard that fired, and when, s. */
 export interface Firing {
   guard: Guard
   time: number
 }
 
 /** A guard with what it showed at the last look. */
-export interface WatchedGuard {
+interface WatchedGuard {
   guard: Guard
   value: number
   rate: number
 }
 
+/** Begins to watch a guard at `t` s. */
 export function watch(guard: Guard, t: number, y: readonly number[]): WatchedGuard {
   return { guard, value: guard.value(t, y), rate: guard.rate(t, y) }
 }

@@ -10,6 +10,7 @@ import { Solver } from '#odex'
 export interface Problem {
   /** Writes dy/dt at `t` (s) into `out`. Must not keep or change `y`. */
   derivative: (t: number, y: readonly number[], out: number[]) => void
+  /** s. */
   start: number
   end: number
   initial: readonly number[]
@@ -38,7 +39,7 @@ class WorkExceeded extends Error {}
 export type Dense = (index: number, t: number) => number
 
 /** Called after each accepted step. False ends the integration there. */
-export type StepObserver = (from: number, to: number, y: readonly number[], dense: Dense) => boolean
+type StepObserver = (from: number, to: number, y: readonly number[], dense: Dense) => boolean
 
 export type IntegrationOutcome =
   'reachedEnd' | 'endedByObserver' | 'workExceeded' | 'tooManySteps' | 'notFinite'
@@ -61,7 +62,7 @@ export const stableReach = 4.5
 const converged = 0
 const maxStepsExceeded = 1
 
-/** Integrates from `start` to `end`; the solution is what `observe` sees. */
+/** Integrates from `start` to `end`; the solution is what `observe` sees. Throws what `derivative` or `observe` throws. */
 export function integrate(problem: Problem, observe: StepObserver): IntegrationOutcome {
   const { derivative, start, end, work } = problem
   const unit = problem.firstStep / smallestFirstStep

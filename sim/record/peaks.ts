@@ -7,7 +7,8 @@ import { bracketedRoot } from '#sim/linalg/root.ts'
 import type { Observer, Position } from '#sim/modes/machine.ts'
 import type { Stretch } from '#sim/modes/stretch.ts'
 
-export interface Peak {
+interface Peak {
+  /** s. */
   time: number
   /** Output, V. */
   value: number

@@ -12,27 +12,33 @@ import { analysePair, totalHarmonicDistortion } from '#sim/spectrum/harmonics.ts
 import type { Mode, SettledTone } from '#sim/types.ts'
 
 /** Harmonics in every THD. */
-export const harmonicCount = 20
+const harmonicCount = 20
 /** Samples of the analysis grid over all periods measured, a power of two. */
 const gridSamples = 4096
 /** Samples of one period in `SettledTone.waveform`. */
-export const waveformSamples = 1024
+const waveformSamples = 1024
 /** How much longer than expected a cycle may take before the search for its end is given up. */
 const patience = 3
 
+/** Figures of the settled periods, each as `shared/figures.ts` defines it. */
 export interface SettledMeasurement {
   tone: SettledTone
+  /** Output, V from the reference. */
   high: number
   low: number
   mean: number
   rms: number
+  /** Ratios of THD_F, at the output and at the network node. */
   thd: number
   thdAtInput: number
+  /** Shares of the time under each limit, 0…1. */
   shares: Record<Exclude<Mode, 'linear'>, number>
+  /** A. */
   peakOutputCurrent: number
 }
 
 /**
+ * @param from where the motion stands, which is left alone
  * @param cuts rising zeros of `v1` per period
  * @param expected about how long such a cycle takes, s
  * @returns null when the motion ends or stops repeating on the way
@@ -77,11 +83,8 @@ export function measureSettled(
       harmonicsAtInput: input.harmonics,
       waveform: { vo: thinned(columns.vo), v1: thinned(columns.v1) },
     },
-    high: oneTurn.list.reduce((most, { high }) => Math.max(most, high), largest(columns.vo)),
-    low: oneTurn.list.reduce(
-      (least, { low }) => Math.min(least, low),
-      -largest(columns.vo.map((value) => -value)),
-    ),
+    high: oneTurn.list.reduce((most, { high }) => Math.max(most, high), greatest(columns.vo)),
+    low: oneTurn.list.reduce((lowest, { low }) => Math.min(lowest, low), least(columns.vo)),
     mean: output.mean,
     rms: output.rms,
     thd: totalHarmonicDistortion(output.harmonics),
@@ -96,10 +99,15 @@ export function measureSettled(
   }
 }
 
-function largest(samples: Float64Array): number {
+function greatest(samples: Float64Array): number {
   return samples.reduce((most, value) => Math.max(most, value), -Infinity)
 }
 
+function least(samples: Float64Array): number {
+  return samples.reduce((lowest, value) => Math.min(lowest, value), Infinity)
+}
+
+/** Evenly chosen samples, `waveformSamples` in all. */
 function thinned(samples: Float64Array): Float64Array {
   const every = samples.length / waveformSamples
   return Float64Array.from({ length: waveformSamples }, (_, n) => samples[n * every]!)

@@ -2,7 +2,7 @@
 import type { Cycle } from '#sim/record/cycles.ts'
 
 /** Largest distance from the level or period still to come, relative, at which a record counts as settled. */
-export const settledTolerance = 1e-4
+const settledTolerance = 1e-4
 /** Spread, relative, that is the integrator's own noise. */
 const noise = 1e-7
 /** Most rising zeros of `v1` that one period of the motion may have. */

@@ -41,6 +41,7 @@ function restsAtRail({ modes, plant, end }: Ending): boolean {
   return last.mode === 'heldHigh' ? demand > 0 : last.mode === 'heldLow' && demand < 0
 }
 
+/** The reason, most fundamental first, and what to do where something helps. */
 export function whyUnsettled(ending: Ending): string {
   const { linear, cycles, stimulus, end } = ending
   if (!disturbed(ending)) return 'Nothing sets it going: without an offset or a kick the loop stays at rest.'

@@ -6,7 +6,7 @@
 import { fft } from 'fft-js'
 import type { Complex } from '#sim/types.ts'
 
-export interface HarmonicAnalysis {
+interface HarmonicAnalysis {
   /** Mean of the samples. */
   mean: number
   /** Root mean square, mean included. */

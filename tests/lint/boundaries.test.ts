@@ -29,8 +29,8 @@ const forbidden: [string, string, string][] = [
   ],
   [
     'client feature to feature',
-    'client/features/tone/index.ts',
-    `export * from '#client/features/start-up/index.ts'\n`,
+    'client/features/tone/tone-page.tsx',
+    `export * from '#client/features/start-up/start-up-page.tsx'\n`,
   ],
   [
     'client to server',

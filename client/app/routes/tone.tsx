@@ -1,7 +1,7 @@
 /** /designs/:designId/tone */
 import { useOutletContext } from 'react-router-dom'
 import type { Sheet } from '#client/features/sheet/sheet.ts'
-import { TonePage } from '#client/features/tone/index.ts'
+import { TonePage } from '#client/features/tone/tone-page.tsx'
 
 export function Component() {
   const { live } = useOutletContext<Sheet>()

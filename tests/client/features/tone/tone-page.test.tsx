@@ -1,7 +1,7 @@
 import { render, screen, within } from '@testing-library/react'
 import userEvent from '@testing-library/user-event'
 import { describe, expect, it, vi } from 'vitest'
-import { TonePage } from '#client/features/tone/index.ts'
+import { TonePage } from '#client/features/tone/tone-page.tsx'
 import { formatPercent, formatQuantity } from '#shared/units/format.ts'
 import { computed, nothingYet } from '#tests/client/components/charts/support/live.ts'
 

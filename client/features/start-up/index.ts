@@ -1,1 +1,0 @@
-export { StartUpPage, type StartUpPageProps } from '#client/features/start-up/components/start-up-page.tsx'

@@ -1,1 +1,0 @@
-export { TonePage, type TonePageProps } from '#client/features/tone/components/tone-page.tsx'

@@ -15,11 +15,14 @@ export interface PlotTable {
 /** Most rows of one table. */
 export const mostRows = 100
 
+/** English ending of an ordinal: 1st, 2nd, 3rd, 4th, 11th. */
 const ordinalEnd = (n: number) => {
   const tens = n % 100
   if (tens > 10 && tens < 14) return 'th'
   return ['th', 'st', 'nd', 'rd'][n % 10] ?? 'th'
 }
+
+/** @param sampleInterval grid of the rows, s; series on another grid are read between their samples */
 export function waveformTable(
   series: readonly WaveformSeries[],
   sampleInterval: number,

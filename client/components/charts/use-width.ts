@@ -6,7 +6,6 @@ import { useMedia } from '#client/lib/media.ts'
 const paperWidth = 600
 
 /** Width of the element, followed as it changes; 0 until it is known. */
-
 export function useWidth(element: RefObject<HTMLElement | null>): number {
   const [width, setWidth] = useState(0)
   const paper = useMedia('print')

@@ -3,26 +3,22 @@ import { useMemo, useState } from 'react'
 import { CursorTable } from '#client/components/charts/cursor-table.tsx'
 import { limitSpans } from '#client/components/charts/limit-spans.ts'
 import { OverviewStrip } from '#client/components/charts/overview-strip.tsx'
-import { PlotCard, type KeyItem } from '#client/components/charts/plot-card.tsx'
+import { PlotCard } from '#client/components/charts/plot-card.tsx'
+import { PlotHints } from '#client/components/charts/plot-hints.tsx'
 import { waveformTable } from '#client/components/charts/plot-table.ts'
+import { keyItem, limitKeyItems } from '#client/components/charts/column-looks.ts'
 import { WaveformChart } from '#client/components/charts/waveform-chart.tsx'
 import { Checkbox } from '#client/components/ui/checkbox.tsx'
 import { PlayheadBar } from '#client/features/runs/components/playhead-bar.tsx'
-import { PlotHints } from '#client/components/charts/plot-hints.tsx'
 import { RunCircuit } from '#client/features/runs/components/run-circuit.tsx'
 import { usePlayhead } from '#client/features/runs/hooks/use-playhead.ts'
 import { follow, modeAt, speedChoices, usualSpeed } from '#client/features/runs/lib/playhead.ts'
-import { keyItem, recordEnd, recordSeries } from '#client/features/runs/lib/record-series.ts'
+import { recordEnd, recordSeries } from '#client/features/runs/lib/record-series.ts'
 import { useViewParams } from '#client/lib/use-view-params.ts'
 import type { Run } from '#shared/schemas/run.ts'
 
 /** Periods that "Zoom in here" shows. */
 const closeUpPeriods = 6
-
-const spanKeys = {
-  held: { label: 'held at a rail', sign: 'held' },
-  slew: { label: 'slewing', sign: 'slew' },
-} as const satisfies Record<string, KeyItem>
 
 export interface RecordViewerProps {
   run: Run
@@ -44,7 +40,6 @@ export function RecordViewer({ run, columns }: RecordViewerProps) {
   const all = useMemo(() => recordSeries(record, columns), [record, columns])
   const series = useMemo(() => all.filter(({ key }) => !hidden.includes(key)), [all, hidden])
   const spans = useMemo(() => limitSpans(modes), [modes])
-  const spanItems = (['held', 'slew'] as const).filter((kind) => spans.some((span) => span.kind === kind))
   const onTime = (wanted: number) => change({ time: wanted, view: follow(view, wanted, end) })
   const playhead = usePlayhead({ modes, end, speed, time, onTime })
   const mode = modeAt(modes, time)
@@ -67,7 +62,7 @@ export function RecordViewer({ run, columns }: RecordViewerProps) {
       <PlotCard
         className="max-lg:order-first"
         title="Record from power-on"
-        keyItems={[...series.map(keyItem), ...spanItems.map((kind) => spanKeys[kind])]}
+        keyItems={[...series.map(keyItem), ...limitKeyItems(spans)]}
         table={() => waveformTable(series, record.sampleInterval, view)}
         footer={
           <>

@@ -1,3 +1,4 @@
+import { recordEnd } from '#client/features/runs/lib/record-series.ts'
 import { formatMoment } from '#client/lib/dates.ts'
 import type { Run } from '#shared/schemas/run.ts'
 import { formatCount, formatQuantity } from '#shared/units/format.ts'
@@ -5,7 +6,7 @@ import { formatCount, formatQuantity } from '#shared/units/format.ts'
 /** Who saved the run, when, with which engine, and its note. */
 export function RunFacts({ run }: { run: Run }) {
   const { samples, sampleInterval } = run.record
-  const duration = formatQuantity((samples - 1) * sampleInterval, 's')
+  const duration = formatQuantity(recordEnd(run.record), 's')
   const facts = [
     ['Saved by', run.author.name],
     ['Saved', formatMoment(run.createdAt)],

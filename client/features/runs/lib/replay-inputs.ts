@@ -1,3 +1,4 @@
+import { recordEnd } from '#client/features/runs/lib/record-series.ts'
 import type { Run } from '#shared/schemas/run.ts'
 import type { RunInputs } from '#shared/schemas/simulation.ts'
 
@@ -10,7 +11,7 @@ export function replayInputs({ inputs, record }: Pick<Run, 'inputs' | 'record'>)
   return {
     ...inputs,
     timing: {
-      duration: duration ?? (record.samples - 1) * record.sampleInterval,
+      duration: duration ?? recordEnd(record),
       sampleInterval: sampleInterval ?? record.sampleInterval,
     },
   }

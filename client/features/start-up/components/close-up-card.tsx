@@ -3,6 +3,7 @@ import { useMemo, useState } from 'react'
 import type { Cursors, LimitSpan, View, WaveformSeries } from '#client/components/charts/chart-types.ts'
 import { PlotCard } from '#client/components/charts/plot-card.tsx'
 import { waveformTable } from '#client/components/charts/plot-table.ts'
+import { keyItem } from '#client/components/charts/column-looks.ts'
 import { WaveformChart } from '#client/components/charts/waveform-chart.tsx'
 import type { CloseUp } from '#client/features/start-up/lib/close-up.ts'
 import { startUpSeries } from '#client/features/start-up/lib/start-up-series.ts'
@@ -28,7 +29,7 @@ export function CloseUpCard({ simulation, spans, closeUp, cursors, onCursorsChan
   return (
     <PlotCard
       title={closeUp.title}
-      keyItems={series.map((one) => ({ label: one.label, sign: one.color, dashed: one.dash !== undefined }))}
+      keyItems={series.map(keyItem)}
       table={() => waveformTable(series, sampleInterval, view)}
     >
       <WaveformChart

@@ -6,6 +6,7 @@ import { OverviewStrip } from '#client/components/charts/overview-strip.tsx'
 import { PlotHints } from '#client/components/charts/plot-hints.tsx'
 import { PlotCard, type KeyItem } from '#client/components/charts/plot-card.tsx'
 import { waveformTable } from '#client/components/charts/plot-table.ts'
+import { keyItem, limitKeyItems } from '#client/components/charts/column-looks.ts'
 import { saveText, spanCsv } from '#client/components/charts/span-csv.ts'
 import { WaveformChart, wholeView } from '#client/components/charts/waveform-chart.tsx'
 import { Button } from '#client/components/ui/button.tsx'
@@ -46,12 +47,9 @@ export function OutputPlot({ simulation, reference, spans, ...rest }: OutputPlot
     [timeTo90],
   )
   const keyItems: KeyItem[] = [
-    ...series.map((one) => ({ label: one.label, sign: one.color, dashed: one.dash !== undefined })),
+    ...series.map(keyItem),
     { label: 'envelope', sign: 'copper' },
-    ...(spans.some((span) => span.kind === 'held')
-      ? [{ label: 'held at a rail', sign: 'held' } as const]
-      : []),
-    ...(spans.some((span) => span.kind === 'slew') ? [{ label: 'slewing', sign: 'slew' } as const] : []),
+    ...limitKeyItems(spans),
   ]
 
   async function save() {

@@ -1,5 +1,6 @@
 /** The series of the start-up plot out of a record. */
 import type { WaveformSeries } from '#client/components/charts/chart-types.ts'
+import { columnLooks } from '#client/components/charts/column-looks.ts'
 import type { Simulation } from '#sim/types.ts'
 
 /** Series besides the output that a person may add. */
@@ -19,7 +20,7 @@ export function startUpSeries(
 ): WaveformSeries[] {
   const lifted = (volts: Float64Array) => (lift === 0 ? volts : volts.map((value) => value + lift))
   const series: WaveformSeries[] = [
-    { key: 'vo', label: 'output', unit: 'V', values: lifted(vo), color: 'petrol' },
+    { key: 'vo', label: 'output', unit: 'V', values: lifted(vo), ...columnLooks.output },
   ]
   if (choice.node)
     series.push({
@@ -27,8 +28,7 @@ export function startUpSeries(
       label: 'network node',
       unit: 'V',
       values: lifted(v1),
-      color: 'plum',
-      dash: [5, 3],
+      ...columnLooks.networkNode,
     })
   if (choice.control && control)
     series.push({
@@ -36,8 +36,7 @@ export function startUpSeries(
       label: control.name,
       unit: control.unit,
       values: control.values,
-      color: 'moss',
-      dash: [8, 3, 2, 3],
+      ...columnLooks.control,
     })
   return series
 }

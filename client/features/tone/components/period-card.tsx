@@ -5,6 +5,7 @@ import { CursorTable } from '#client/components/charts/cursor-table.tsx'
 import { PlotHints } from '#client/components/charts/plot-hints.tsx'
 import { PlotCard } from '#client/components/charts/plot-card.tsx'
 import { waveformTable } from '#client/components/charts/plot-table.ts'
+import { keyItem } from '#client/components/charts/column-looks.ts'
 import { WaveformChart, wholeView } from '#client/components/charts/waveform-chart.tsx'
 import { onePeriod } from '#client/features/tone/lib/one-period.ts'
 import type { SettledTone } from '#sim/types.ts'
@@ -19,7 +20,7 @@ export function PeriodCard({ tone }: { tone: SettledTone }) {
   return (
     <PlotCard
       title="One settled period"
-      keyItems={series.map((one) => ({ label: one.label, sign: one.color, dashed: one.dash !== undefined }))}
+      keyItems={series.map(keyItem)}
       table={() => waveformTable(series, sampleInterval, view)}
       footer={<CursorTable {...{ series, sampleInterval, cursors }} />}
     >

@@ -1,5 +1,6 @@
 /** One settled period as plot series. */
 import type { WaveformSeries } from '#client/components/charts/chart-types.ts'
+import { columnLooks } from '#client/components/charts/column-looks.ts'
 import type { SettledTone } from '#sim/types.ts'
 
 export interface OnePeriod {
@@ -20,14 +21,13 @@ export function onePeriod({ waveform, frequency }: SettledTone): OnePeriod {
   return {
     sampleInterval: 1 / (frequency * waveform.vo.length),
     series: [
-      { key: 'vo', label: 'output', unit: 'V', values: closed(waveform.vo), color: 'petrol' },
+      { key: 'vo', label: 'output', unit: 'V', values: closed(waveform.vo), ...columnLooks.output },
       {
         key: 'v1',
         label: 'network node',
         unit: 'V',
         values: closed(waveform.v1),
-        color: 'plum',
-        dash: [5, 3],
+        ...columnLooks.networkNode,
       },
     ],
   }

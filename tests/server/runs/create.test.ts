@@ -144,7 +144,7 @@ describe('POST /api/runs', () => {
       'more samples than the engine computes',
       { duration: 60e-3, sampleInterval: 1e-10 },
       'sampleInterval',
-      /1000001/,
+      /1,000,001/,
     ],
     ['an interval longer than the record', { duration: 1e-3, sampleInterval: 1e-2 }, 'duration', /shorter/],
   ])('refuses %s at its field', async (_what, timing, field, sentence) => {

@@ -1,3 +1,4 @@
+/** Numbers and quantities as the interface writes them: the one formatter. */
 const prefixes: Record<number, string> = {
   [-18]: 'a',
   [-15]: 'f',
@@ -14,7 +15,7 @@ const prefixes: Record<number, string> = {
 
 /** Thin space between number and unit; a true minus sign before negative numbers. */
 export const thinSpace = '\u2009'
-const minusSign = '\u2212'
+export const minusSign = '\u2212'
 
 export interface FormatOptions {
   /** Significant digits, 4 unless told. */
@@ -47,6 +48,12 @@ function plain(value: number, digits: number): string {
   return Math.abs(rounded) >= leastGrouped && Number.isInteger(rounded) ? grouped.format(rounded) : text
 }
 
+/** Power of ten of the SI prefix, from atto to tera, that brings a value other than zero to between 1 and 1000. */
+export function prefixExponent(value: number): number {
+  const thousands = Math.floor(Math.log10(Math.abs(value)) / 3 + 1e-12)
+  return Math.min(12, Math.max(-18, thousands * 3))
+}
+
 /**
  * A value in SI units as engineering number and prefixed unit: 989.69 Hz, 2.2 kΩ, −1.5 mV. A unit that begins with
  * `1/` takes no prefix: k1/s would say nothing. A slew rate is in V/µs, as every data sheet has it.
@@ -60,8 +67,7 @@ export function quantityParts(value: number, unit: string, options: FormatOption
   if (unit === 'V/s' && Math.abs(value) >= 1e3)
     return { number: withSign(plain(value / 1e6, digits), signed), unit: 'V/µs' }
   const rounded = Number(value.toPrecision(digits))
-  const decade = Math.floor(Math.log10(Math.abs(rounded)) / 3 + 1e-12) * 3
-  const exponent = unit.startsWith('1/') ? 0 : Math.min(12, Math.max(-18, decade))
+  const exponent = unit.startsWith('1/') ? 0 : prefixExponent(rounded)
   return {
     number: withSign(plain(rounded / 10 ** exponent, digits), signed),
     unit: `${prefixes[exponent] ?? ''}${unit}`,

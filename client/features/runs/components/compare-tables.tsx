@@ -23,7 +23,9 @@ export function CompareFigures({ a, b }: { a: Run; b: Run }) {
             <RowHead>{figure(pair.key).name}</RowHead>
             <Cell>{formatFigure(pair.key, pair.a, { digits })}</Cell>
             <Cell>{formatFigure(pair.key, pair.b, { digits })}</Cell>
-            <Cell>{pair.negligible ? '≈ 0' : formatDifference(pair.key, pair.difference, true)}</Cell>
+            <Cell>
+              {pair.negligible ? '≈ 0' : formatDifference(pair.key, pair.difference, { signed: true })}
+            </Cell>
             <Cell>{pair.negligible ? '≈ 0' : formatShare(pair.relative, { digits: 3, signed: true })}</Cell>
           </tr>
         ))}

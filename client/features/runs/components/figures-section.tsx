@@ -26,7 +26,7 @@ function ComparedCells({ row }: { row: FigureComparison }) {
       <Cell>
         <Value name={row.key} value={row.replayed} digits={digits.compared} />
       </Cell>
-      <Cell>{formatDifference(row.key, row.difference, true)}</Cell>
+      <Cell>{formatDifference(row.key, row.difference, { signed: true })}</Cell>
       <Cell>{row.tolerance === null ? '–' : `± ${formatDifference(row.key, row.tolerance)}`}</Cell>
       <Cell>
         <Outcome passes={row.passes} />

@@ -1,6 +1,6 @@
 import { figure, type FigureKey } from '#shared/figures.ts'
 import { formatFigure } from '#shared/units/format-figure.ts'
-import { formatPercent, thinSpace } from '#shared/units/format.ts'
+import { formatPercent, minusSign, thinSpace, type FormatOptions } from '#shared/units/format.ts'
 
 const superscripts: Record<string, string> = {
   '-': '⁻',
@@ -21,14 +21,11 @@ const smallest = 1e-3
 function powerOfTen(value: number): string {
   const [mantissa, exponent] = value.toExponential(1).split('e') as [string, string]
   const raised = [...exponent.replace('+', '')].map((digit) => superscripts[digit]).join('')
-  return `${mantissa.replace('-', '−')} × 10${raised}`
+  return `${mantissa.replace('-', minusSign)} × 10${raised}`
 }
 
-/** A ratio in per cent, two digits or three, as a power of ten where it is tiny. */
-export function formatShare(
-  ratio: number | null,
-  options: { digits?: number; signed?: boolean } = {},
-): string {
+/** A ratio in per cent, two digits unless told, as a power of ten where it is tiny. */
+export function formatShare(ratio: number | null, options: FormatOptions = {}): string {
   if (ratio === null) return '–'
   if (ratio === 0) return '0'
   const { digits = 2, signed = false } = options
@@ -40,7 +37,11 @@ export function formatShare(
  * A small difference or tolerance of a figure, in the figure's own way of being shown: two digits; what has no SI
  * prefix to shrink into becomes a power of ten.
  */
-export function formatDifference(key: FigureKey, value: number | null, signed = false): string {
+export function formatDifference(
+  key: FigureKey,
+  value: number | null,
+  { signed = false }: Pick<FormatOptions, 'signed'> = {},
+): string {
   if (value === null) return '–'
   if (value === 0) return '0'
   const { shownAs, unit } = figure(key)

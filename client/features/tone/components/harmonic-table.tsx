@@ -1,11 +1,11 @@
 /** Every harmonic in figures. */
 import type { HarmonicRow } from '#client/features/tone/lib/harmonic-rows.ts'
-import { formatPercent, formatQuantity, thinSpace } from '#shared/units/format.ts'
+import { formatPercent, formatQuantity, minusSign, thinSpace } from '#shared/units/format.ts'
 
 const columns = ['frequency', 'level, peak', 'relative to the fundamental', 'per cent', 'phase']
 
 /** One decimal, also when it is zero, so that the column lines up. */
-const toTenth = (value: number) => value.toFixed(1).replace('-', '\u2212')
+const toTenth = (value: number) => value.toFixed(1).replace('-', minusSign)
 
 function cells({ frequency, level, ratio, decibels, phase }: HarmonicRow): string[] {
   return [

@@ -60,7 +60,7 @@ describe('formatDifference', () => {
   it('shrinks into a prefix where there is a unit, into a power of ten where there is none', () => {
     expect(formatDifference('level', 1.234e-13)).toBe('120\u2009fV')
     expect(formatDifference('gain', -3.2e-9)).toBe('−3.2 × 10⁻⁹')
-    expect(formatDifference('thd', 1e-9, true)).toBe('+1.0 × 10⁻⁷\u2009%')
+    expect(formatDifference('thd', 1e-9, { signed: true })).toBe('+1.0 × 10⁻⁷\u2009%')
     expect(formatDifference('thd', 0.0012)).toBe('0.12\u2009%')
     expect(formatDifference('gain', 0)).toBe('0')
     expect(formatDifference('gain', null)).toBe('–')

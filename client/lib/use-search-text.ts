@@ -4,12 +4,12 @@ import { useEffect, useEffectEvent, useState } from 'react'
 const typingRest = 250
 
 /**
- * The text of a search field whose search lives in the address: the address follows once typing rests, and the text
- * follows the address when that changes by itself (back, a link, "show all").
+ * The text of a search field whose search is kept elsewhere, mostly in the address: that follows once typing rests, and
+ * the text follows it when it changes by itself (back, a link, "show all").
  */
 export function useSearchText(search: string, onSearch: (search: string) => void) {
   const [text, setText] = useState(search)
-  // The address as it was last seen, and what this field itself asked for last.
+  // The search as it was last seen, and what this field itself asked for last.
   const [seen, setSeen] = useState(search)
   const [asked, setAsked] = useState(search)
   if (search !== seen) {

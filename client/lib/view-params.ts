@@ -1,9 +1,9 @@
 /** What a waveform page shows, as its address holds it: span, cursors and playhead, in seconds from power-on. */
 
-/** Visible span, [from, to]. */
-type View = readonly [from: number, to: number]
+/** Visible span of time, [from, to], s. */
+export type View = readonly [from: number, to: number]
 /** The two cursors; null while one is not placed. */
-type Cursors = readonly [first: number | null, second: number | null]
+export type Cursors = readonly [first: number | null, second: number | null]
 
 export interface ViewState {
   view: View

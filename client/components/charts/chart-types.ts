@@ -1,11 +1,7 @@
 /** What the plots of this folder exchange. Times in seconds from power-on, values in SI units. */
 import type { ChartColour } from '#client/components/charts/chart-colours.ts'
 
-/** Visible span of time, [from, to]. */
-export type View = readonly [from: number, to: number]
-
-/** The two cursors; null while one is not placed. */
-export type Cursors = readonly [first: number | null, second: number | null]
+export type { Cursors, View } from '#client/lib/view-params.ts'
 
 /** A column of a record on a uniform grid that begins at power-on. */
 export interface WaveformSeries {

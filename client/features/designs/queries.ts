@@ -1,15 +1,14 @@
 /** Server state of the list of designs and of the projects. */
 import { keepPreviousData, queryOptions } from '@tanstack/react-query'
 import { api } from '#client/lib/api.ts'
+import { designKeys } from '#client/lib/design-keys.ts'
 import type { DesignSummary, ListDesigns, Project } from '#shared/schemas/design.ts'
 import type { Page } from '#shared/schemas/paging.ts'
 
 export const designQueries = {
-  all: () => ['designs'] as const,
-  lists: () => [...designQueries.all(), 'list'] as const,
   list: (params: ListDesigns) =>
     queryOptions({
-      queryKey: [...designQueries.lists(), params],
+      queryKey: [...designKeys.lists(), params],
       queryFn: ({ signal }) => api.get<Page<DesignSummary>>('/designs', { signal, query: { ...params } }),
       placeholderData: keepPreviousData,
     }),

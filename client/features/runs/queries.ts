@@ -1,6 +1,8 @@
 /** Runs on the server: what the pages read, and the two requests that change something. */
 import { keepPreviousData, mutationOptions, queryOptions, type QueryClient } from '@tanstack/react-query'
-import { api } from '#client/lib/api.ts'
+import { api, apiUrl } from '#client/lib/api.ts'
+import { designKeys } from '#client/lib/design-keys.ts'
+import { limits } from '#shared/limits.ts'
 import { decodeColumns } from '#shared/record-codec.ts'
 import type { DesignSummary } from '#shared/schemas/design.ts'
 import type { Page } from '#shared/schemas/paging.ts'
@@ -35,7 +37,7 @@ export const runQueries = {
       queryFn: ({ signal }) =>
         api.get<Page<DesignSummary>>('/designs', {
           signal,
-          query: { sort: 'name', order: 'asc', pageSize: 100 },
+          query: { sort: 'name', order: 'asc', pageSize: limits.pageSize },
         }),
     }),
 }
@@ -44,7 +46,7 @@ export const runQueries = {
 const refreshLists = (client: QueryClient) =>
   Promise.all([
     client.invalidateQueries({ queryKey: runQueries.lists() }),
-    client.invalidateQueries({ queryKey: ['designs', 'list'] }),
+    client.invalidateQueries({ queryKey: designKeys.lists() }),
   ])
 
 /** A page of the list once the run is gone. */
@@ -76,4 +78,4 @@ export const runMutations = {
 }
 
 /** Where the browser fetches a run's record as CSV. */
-export const exportUrl = (id: number) => `/api/runs/${id}/export.csv`
+export const exportUrl = (id: number) => apiUrl(`/runs/${id}/export.csv`)

@@ -64,7 +64,7 @@ export function RunListPage() {
             rows={rows}
             rowKey={(run) => String(run.id)}
             sort={{ id: params.sort, order: params.order }}
-            onSort={({ id, order }) => change({ sort: id as ListRuns['sort'], order })}
+            onSort={({ id, order }) => change({ sort: listRunsSchema.shape.sort.parse(id), order })}
             card={(run) => <RunListCard run={run} {...picking} />}
             stale={list.isPlaceholderData}
           />

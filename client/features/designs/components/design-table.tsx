@@ -1,10 +1,10 @@
 import type { ColumnDef } from '@tanstack/react-table'
 import { useMemo } from 'react'
 import { Link } from 'react-router-dom'
+import { Age } from '#client/components/ui/age.tsx'
 import { DataTable } from '#client/components/ui/data-table.tsx'
 import type { Sort } from '#client/components/ui/sorting.tsx'
 import { DesignMenu } from '#client/features/designs/components/design-menu.tsx'
-import { formatAge, formatMoment } from '#client/lib/dates.ts'
 import type { DesignSummary } from '#shared/schemas/design.ts'
 
 export interface DesignTableProps {
@@ -26,14 +26,11 @@ function NameLink({ design }: { design: DesignSummary }) {
   )
 }
 
-/** When, with the exact moment on hover, and who. */
+/** When, and by whom. */
 function Changed({ design }: { design: DesignSummary }) {
   return (
     <>
-      <time dateTime={design.updatedAt} title={formatMoment(design.updatedAt)}>
-        {formatAge(design.updatedAt)}
-      </time>{' '}
-      <span className="text-soft">by {design.updatedBy.name}</span>
+      <Age of={design.updatedAt} /> <span className="text-soft">by {design.updatedBy.name}</span>
     </>
   )
 }

@@ -1,14 +1,15 @@
 /** Everything the list can do to designs and projects. Each change makes the lists ask again. */
 import { useMutation, useQueryClient } from '@tanstack/react-query'
-import { designQueries, projectQueries } from '#client/features/designs/queries.ts'
+import { projectQueries } from '#client/features/designs/queries.ts'
 import { api } from '#client/lib/api.ts'
+import { designKeys } from '#client/lib/design-keys.ts'
 import type { ChangeDesign, CreateDesign, Design, Project } from '#shared/schemas/design.ts'
 
 function useRefresh() {
   const queryClient = useQueryClient()
   return () =>
     Promise.all([
-      queryClient.invalidateQueries({ queryKey: designQueries.all() }),
+      queryClient.invalidateQueries({ queryKey: designKeys.all() }),
       queryClient.invalidateQueries({ queryKey: projectQueries.all() }),
     ])
 }

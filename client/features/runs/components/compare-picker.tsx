@@ -10,9 +10,8 @@ import { TextInput } from '#client/components/ui/text-input.tsx'
 import { comparePath } from '#client/features/runs/lib/pick.ts'
 import { runQueries } from '#client/features/runs/queries.ts'
 import { formatAge } from '#client/lib/dates.ts'
-import { useDebounced } from '#client/lib/use-debounced.ts'
+import { useSearchText } from '#client/lib/use-search-text.ts'
 
-const typingRest = 250
 /** Runs offered at a time; the search finds the rest. */
 const offered = 8
 
@@ -49,8 +48,8 @@ function Choices({ runId, search }: { runId: number; search: string }) {
 /** "Compare with…": finds the second run. */
 export function ComparePicker({ runId }: { runId: number }) {
   const [open, setOpen] = useState(false)
-  const [text, setText] = useState('')
-  const search = useDebounced(text.trim(), typingRest)
+  const [search, setSearch] = useState('')
+  const [text, setText] = useSearchText(search, setSearch)
   return (
     <>
       <Button onClick={() => setOpen(true)}>Compare with…</Button>

@@ -1,7 +1,8 @@
+/** One run in the list: as columns of the table, and as a card on a phone. */
 import type { ColumnDef } from '@tanstack/react-table'
 import { Link } from 'react-router-dom'
+import { Age } from '#client/components/ui/age.tsx'
 import { Checkbox } from '#client/components/ui/checkbox.tsx'
-import { formatAge, formatMoment } from '#client/lib/dates.ts'
 import type { FigureKey } from '#shared/figures.ts'
 import type { RunSummary } from '#shared/schemas/run.ts'
 import { formatFigure } from '#shared/units/format-figure.ts'
@@ -11,7 +12,7 @@ export interface Picking {
   onPick: (run: RunSummary) => void
 }
 
-export function PickBox({ run, isPicked, onPick }: Picking & { run: RunSummary }) {
+function PickBox({ run, isPicked, onPick }: Picking & { run: RunSummary }) {
   return (
     <Checkbox
       label={`Compare ${run.title}`}
@@ -22,7 +23,7 @@ export function PickBox({ run, isPicked, onPick }: Picking & { run: RunSummary }
   )
 }
 
-export function RunTitle({ run }: { run: RunSummary }) {
+function RunTitle({ run }: { run: RunSummary }) {
   return (
     <div className="min-w-0">
       <Link to={`/runs/${run.id}`} className="font-medium text-petrol wrap-anywhere">
@@ -38,15 +39,7 @@ function Figure({ run, name }: { run: RunSummary; name: FigureKey }) {
 }
 
 function Saved({ run }: { run: RunSummary }) {
-  return (
-    <time
-      dateTime={run.createdAt}
-      title={formatMoment(run.createdAt)}
-      className="whitespace-nowrap text-soft"
-    >
-      {formatAge(run.createdAt)}
-    </time>
-  )
+  return <Age of={run.createdAt} className="whitespace-nowrap text-soft" />
 }
 
 /** Columns of the list; the ids of those that sort are the server's words. */

@@ -20,7 +20,7 @@ function optionsOf(known: readonly Option[], chosen: number | undefined, noun: s
   return [...byId.values()].sort((a, b) => a.name.localeCompare(b.name))
 }
 
-interface ChoiceProps {
+interface FilterProps {
   label: string
   anything: string
   options: readonly Option[]
@@ -28,7 +28,7 @@ interface ChoiceProps {
   onChange: (id: number | undefined) => void
 }
 
-function Choice({ label, anything, options, value, onChange }: ChoiceProps) {
+function Filter({ label, anything, options, value, onChange }: FilterProps) {
   return (
     <Field label={label} className="basis-52 max-sm:grow">
       <Select
@@ -70,14 +70,14 @@ export function RunFilters({ params, shown, onChange }: RunFiltersProps) {
           onChange={(event) => setText(event.target.value)}
         />
       </Field>
-      <Choice
+      <Filter
         label="Design"
         anything="Any design"
         options={optionsOf([...(designs.data?.items ?? []), ...shownDesigns], params.designId, 'Design')}
         value={params.designId}
         onChange={(designId) => onChange({ designId })}
       />
-      <Choice
+      <Filter
         label="Saved by"
         anything="Anyone"
         options={optionsOf(authors, params.authorId, 'Person')}

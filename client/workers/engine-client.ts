@@ -13,7 +13,7 @@ import { createRecordQueue } from '#client/workers/record-queue.ts'
  * 1 kHz circuit by the stepping integrator on a slow machine, so that the figures follow a moving trim slider and the
  * worker stays warm; a record of many seconds, on the other hand, has long had its grace when the next edit comes.
  */
-export const graceTime = 1000
+const graceTime = 1000
 
 export interface OwnedEngine extends EngineClient {
   /** Ends every worker. Requests under way reject with an `AbortError`. */

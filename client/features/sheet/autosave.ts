@@ -119,8 +119,10 @@ export function createAutosave({ draft, save, onStatus, onSaved }: AutosaveOptio
       if (next === content) return
       content = next
       if (status.kind === 'conflict' || inFlight) return
-      if (status.kind !== 'offline') tell({ kind: 'unsaved' })
-      if (status.kind !== 'offline') later(restTime)
+      // While the server is away its own retries will send it.
+      if (status.kind === 'offline') return
+      tell({ kind: 'unsaved' })
+      later(restTime)
     },
     retry() {
       if (status.kind === 'offline' || status.kind === 'refused') void send()

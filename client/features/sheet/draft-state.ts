@@ -20,8 +20,10 @@ export type DraftAction =
   | {
       type: 'edit'
       change: Change
+      /** Changes in a row with the same step are undone together; null stands by itself. */
       step: string | null
-      /** Field whose refused text this replaces. */ field?: string
+      /** Field whose refused text this replaces. */
+      field?: string
     }
   | { type: 'refuse'; field: string; text: RefusedText }
   | { type: 'seal' | 'undo' | 'redo' }

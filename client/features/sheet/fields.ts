@@ -61,8 +61,9 @@ function device<Kind extends 'diodes' | 'lamp'>(
     unit,
     paths: [`circuit.amplitudeControl.${key}`],
     read: ({ circuit }) => {
-      const control = circuit.amplitudeControl
-      return control.kind === kind ? ((control as unknown as Record<string, number>)[key] ?? null) : null
+      const control: Readonly<Record<string, unknown>> = circuit.amplitudeControl
+      const value = control.kind === kind ? control[key] : null
+      return typeof value === 'number' ? value : null
     },
     write: (content, value) => ({
       ...content,

@@ -11,7 +11,7 @@ const twins: Record<Part, Part> = {
   shuntC: 'seriesC',
 }
 
-export function withNetwork(content: DraftContent, change: Partial<Network>): DraftContent {
+function withNetwork(content: DraftContent, change: Partial<Network>): DraftContent {
   const { circuit } = content
   return { ...content, circuit: { ...circuit, network: { ...circuit.network, ...change } } }
 }

@@ -10,7 +10,7 @@ const spare = 0.15
  * Up to this margin a bare loop's clipping stays mild. For a sine that only its rails limit, distortion is about twice
  * the margin (describing function of a clipped sine), so this is near 3 %. Common practice, no source.
  */
-export const mildMargin = 0.015
+const mildMargin = 0.015
 
 export interface TrimRange {
   /** Feedback R at both ends of the travel, Ω. */

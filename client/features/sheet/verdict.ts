@@ -44,7 +44,7 @@ function holder(circuit: Circuit, figures: Figures): { who: string; how: string 
 }
 
 /** Growth of the envelope in one cycle, as a ratio: 0.06 is 6 % a cycle. */
-export function growthPerCycle({ growthRate, frequency }: SmallSignal): number {
+function growthPerCycle({ growthRate, frequency }: SmallSignal): number {
   return Math.expm1(growthRate / frequency)
 }
 
@@ -117,5 +117,3 @@ function whenItDoesNot(linear: SmallSignal, circuit: Circuit): Phrase[] {
 export function verdict(linear: SmallSignal, circuit: Circuit, record: RecordFacts | null): Phrase[] {
   return linear.starts ? whenItStarts(linear, circuit, record) : whenItDoesNot(linear, circuit)
 }
-
-export const verdictText = (phrases: readonly Phrase[]) => phrases.map((phrase) => phrase.text).join('')

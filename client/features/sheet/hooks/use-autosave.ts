@@ -26,8 +26,8 @@ export interface AutosaveInputs {
   design: Design
   content: DraftContent
   readOnly: boolean
-  /** Shows content that came from elsewhere: as an undo step when a person chose it, else as a new beginning. */
-  show: (content: DraftContent, chosen: boolean) => void
+  /** Shows content that came from elsewhere: as an undo step (`replace`), or as a new beginning (`reset`). */
+  show: (content: DraftContent, how: 'replace' | 'reset') => void
 }
 
 export function useAutosave({ design, content, readOnly, show }: AutosaveInputs): DraftSaving {
@@ -83,7 +83,7 @@ export function useAutosave({ design, content, readOnly, show }: AutosaveInputs)
     version.current = design.draft.version
     first.current = design.draft
     autosave.current?.adopt(design.draft)
-    show(design.draft.content, false)
+    show(design.draft.content, 'reset')
   }, [design.draft, show])
 
   const waiting = status.kind !== 'saved'
@@ -97,7 +97,7 @@ export function useAutosave({ design, content, readOnly, show }: AutosaveInputs)
   const adopt = useCallback(
     (draft: Draft) => {
       autosave.current?.adopt(draft)
-      show(draft.content, true)
+      show(draft.content, 'replace')
     },
     [show],
   )
@@ -109,7 +109,7 @@ export function useAutosave({ design, content, readOnly, show }: AutosaveInputs)
     restoreCopy() {
       if (!copy) return
       autosave.current?.beginFrom(copy.version)
-      show(copy.content, true)
+      show(copy.content, 'replace')
       setCopy(null)
     },
     discardCopy() {

@@ -25,7 +25,7 @@ export interface SheetEditing {
   readOnly: boolean
   edit: (change: Change, step?: string) => void
   field: (name: FieldName) => FieldState
-  setField: (name: FieldName, value: number | null, step?: string) => void
+  setField: (name: FieldName, value: number | null) => void
   refuseField: (name: FieldName, text: RefusedText) => void
   /** Ends the undo step that is being typed or dragged. */
   seal: () => void
@@ -56,7 +56,7 @@ export function useSheet(design: Design): SheetState {
   const inputs = useMemo<RunInputs>(() => ({ circuit, stimulus, timing }), [circuit, stimulus, timing])
   const live = useLive(inputs)
   const show = useCallback(
-    (next: DraftContent, chosen: boolean) => dispatch({ type: chosen ? 'replace' : 'reset', content: next }),
+    (next: DraftContent, how: 'replace' | 'reset') => dispatch({ type: how, content: next }),
     [],
   )
   const saving = useAutosave({ design, content: state.valid, readOnly, show })
@@ -90,11 +90,11 @@ export function useSheet(design: Design): SheetState {
           error: text?.sentence ?? fieldError(spec, content, sentences),
         }
       },
-      setField(name, value, step) {
+      setField(name, value) {
         const spec = fieldOf(name)
         const change: Change = (before) =>
           value === null ? (spec.clear?.(before) ?? before) : spec.write(before, value)
-        dispatch({ type: 'edit', change, step: step ?? spec.key, field: spec.key })
+        dispatch({ type: 'edit', change, step: spec.key, field: spec.key })
       },
       refuseField: (name, text) => dispatch({ type: 'refuse', field: fieldOf(name).key, text }),
       seal: () => dispatch({ type: 'seal' }),

@@ -2,7 +2,7 @@ import { describe, expect, it } from 'vitest'
 import { cautions } from '#client/features/sheet/cautions.ts'
 import { criticalFeedback, trimRange } from '#client/features/sheet/trim.ts'
 import { verdictFigures } from '#client/features/sheet/verdict-figures.ts'
-import { verdict, verdictText } from '#client/features/sheet/verdict.ts'
+import { verdict } from '#client/features/sheet/verdict.ts'
 import { withControl } from '#client/features/sheet/amplitude-control.ts'
 import { figureKeys, type Figures } from '#shared/figures.ts'
 import type { Circuit } from '#shared/schemas/circuit.ts'
@@ -17,9 +17,9 @@ const none = Object.fromEntries(figureKeys.map((key) => [key, null])) as Figures
 const plainly = (text: string) => text.replaceAll('\u2009', ' ')
 const say = (circuit: Circuit, figures: Partial<Figures> | null, duration = 0.18) =>
   plainly(
-    verdictText(
-      verdict(smallSignal(circuit), circuit, figures && { figures: { ...none, ...figures }, duration }),
-    ),
+    verdict(smallSignal(circuit), circuit, figures && { figures: { ...none, ...figures }, duration })
+      .map((phrase) => phrase.text)
+      .join(''),
   )
 
 describe('verdict', () => {

@@ -9,18 +9,26 @@ export interface DemoAccount {
   password: string
 }
 
-const account = (name: string, local: string, role: Role): DemoAccount => ({
+const address = (local: string) => `${local}@brackwater.example`
+
+/** E-mail addresses of those who made designs and runs. */
+export const mara = address('mara')
+export const tomasz = address('tomasz')
+export const helene = address('helene')
+export const sigrid = address('sigrid')
+
+const account = (name: string, email: string, role: Role): DemoAccount => ({
   name,
-  email: `${local}@brackwater.example`,
+  email,
   role,
   password: `demo-${role}-only`,
 })
 
 export const demoAccounts: readonly DemoAccount[] = [
-  account('Mara Lindholm', 'mara', 'engineer'),
-  account('Tomasz Wrona', 'tomasz', 'engineer'),
-  account('Helene Osei', 'helene', 'reviewer'),
-  account('Jonas Ekberg', 'jonas', 'technician'),
-  account('Priya Sandhu', 'priya', 'technician'),
-  account('Sigrid Aune', 'sigrid', 'admin'),
+  account('Mara Lindholm', mara, 'engineer'),
+  account('Tomasz Wrona', tomasz, 'engineer'),
+  account('Helene Osei', helene, 'reviewer'),
+  account('Jonas Ekberg', address('jonas'), 'technician'),
+  account('Priya Sandhu', address('priya'), 'technician'),
+  account('Sigrid Aune', sigrid, 'admin'),
 ]

@@ -1,11 +1,12 @@
 /** The six invented designs of the demo. Inputs only: every result is the engine's. SI units. */
+import { mara, tomasz } from '#server/db/demo/accounts.ts'
 import { amplifierClasses } from '#shared/amplifier-classes.ts'
 import type { Circuit } from '#shared/schemas/circuit.ts'
 import type { DraftContent } from '#shared/schemas/simulation.ts'
 
 export type DemoDesignKey = 'bare' | 'diodes' | 'lamp' | 'tracer' | 'mismatched' | 'silent'
 
-export interface DemoDesign {
+interface DemoDesign {
   key: DemoDesignKey
   project: string
   name: string
@@ -20,9 +21,6 @@ export const demoProjects = {
   calibrator: 'Bench calibrator (invented)',
   tracer: 'Cable tracer (invented)',
 } as const
-
-const mara = 'mara@brackwater.example'
-const tomasz = 'tomasz@brackwater.example'
 
 const equalArms = (resistance: number, capacitance: number): Circuit['network'] => ({
   seriesR: resistance,

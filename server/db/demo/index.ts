@@ -36,7 +36,11 @@ export async function seedDemo(context: AppContext): Promise<boolean> {
 
     const people = await models.Person.bulkCreate(
       demoAccounts.map(({ name, email, role, password }) => ({
-        ...{ name, email, role, passwordHash: hashes.get(password)!, demo: true },
+        name,
+        email,
+        role,
+        passwordHash: hashes.get(password)!,
+        demo: true,
         ...stamps,
       })),
       { transaction },
@@ -75,6 +79,7 @@ async function hashPasswords(cost: number): Promise<Map<string, string>> {
   )
 }
 
+/** The inputs of a demo run, and what the engine makes of them. */
 async function compute(
   { compute: pool }: AppContext,
   run: DemoRun,

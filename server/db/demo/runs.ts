@@ -1,4 +1,5 @@
 /** The invented runs of the demo. Titles and notes are typed in, results never: a note quotes no figure. */
+import { helene, mara, sigrid, tomasz } from '#server/db/demo/accounts.ts'
 import type { DemoDesignKey } from '#server/db/demo/designs.ts'
 import type { RunInputs } from '#shared/schemas/simulation.ts'
 
@@ -11,11 +12,6 @@ export interface DemoRun {
   /** What differs from the design's draft. */
   change?: (draft: RunInputs) => RunInputs
 }
-
-const mara = 'mara@brackwater.example'
-const tomasz = 'tomasz@brackwater.example'
-const helene = 'helene@brackwater.example'
-const sigrid = 'sigrid@brackwater.example'
 
 const invented = (text: string) => `${text}\n\nInvented demo data.`
 

@@ -3,6 +3,7 @@ import type { AppContext } from '#server/context.ts'
 import type { Design } from '#server/db/models/design.ts'
 import type { Draft } from '#server/db/models/draft.ts'
 import type { Person } from '#server/db/models/person.ts'
+import { rowsOf } from '#server/db/paging.ts'
 import { containsText } from '#server/db/search.ts'
 import type { ListDesigns } from '#shared/schemas/design.ts'
 import type { DraftContent } from '#shared/schemas/simulation.ts'
@@ -52,9 +53,7 @@ export function designsRepository({ database }: Pick<AppContext, 'database'>) {
         where: conditions(query),
         include: [project, people, draftHead],
         order: ordering(query),
-        limit: query.pageSize,
-        offset: (query.page - 1) * query.pageSize,
-        subQuery: false,
+        ...rowsOf(query),
       }),
 
     /** A design with everything that belongs to it, its draft's content included. */

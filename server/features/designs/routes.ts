@@ -1,6 +1,5 @@
 import { Router } from 'express'
 import type { AppContext } from '#server/context.ts'
-import { presentDesign, presentDesignSummary, presentDraft } from '#server/features/designs/present.ts'
 import { designsUseCases } from '#server/features/designs/use-cases.ts'
 import { authorise, signedIn } from '#server/http/authenticate.ts'
 import { readBody, readId, readQuery } from '#server/http/input.ts'
@@ -10,46 +9,37 @@ import {
   duplicateDesignSchema,
   listDesignsSchema,
   saveDraftSchema,
-  type DesignSummary,
 } from '#shared/schemas/design.ts'
-import type { Page } from '#shared/schemas/paging.ts'
 
 const what = 'This design'
 
+/** `/api/designs`: designs and the one draft of each. */
 export function designsRouter(context: AppContext): Router {
   const designs = designsUseCases(context)
   const router = Router()
   router.get('/', authorise('designs.read'), async (request, response) => {
-    const query = readQuery(request, listDesignsSchema)
-    const { rows, count } = await designs.list(query)
-    const page: Page<DesignSummary> = {
-      items: rows.map(presentDesignSummary),
-      total: count,
-      page: query.page,
-      pageSize: query.pageSize,
-    }
-    response.json(page)
+    response.json(await designs.list(readQuery(request, listDesignsSchema)))
   })
   router.post('/', authorise('designs.edit'), async (request, response) => {
     const body = readBody(request, createDesignSchema)
-    response.status(201).json(presentDesign(await designs.create(body, signedIn(request).person)))
+    response.status(201).json(await designs.create(body, signedIn(request).person))
   })
   router.get('/:id', authorise('designs.read'), async (request, response) => {
-    response.json(presentDesign(await designs.read(readId(request, what))))
+    response.json(await designs.read(readId(request, what)))
   })
   router.patch('/:id', authorise('designs.edit'), async (request, response) => {
     const id = readId(request, what)
-    response.json(presentDesign(await designs.change(id, readBody(request, changeDesignSchema))))
+    response.json(await designs.change(id, readBody(request, changeDesignSchema)))
   })
   router.post('/:id/duplicate', authorise('designs.edit'), async (request, response) => {
     const id = readId(request, what)
     const { name } = readBody(request, duplicateDesignSchema)
-    response.status(201).json(presentDesign(await designs.duplicate(id, name, signedIn(request).person)))
+    response.status(201).json(await designs.duplicate(id, name, signedIn(request).person))
   })
   router.put('/:id/draft', authorise('designs.edit'), async (request, response) => {
     const id = readId(request, what)
     const body = readBody(request, saveDraftSchema)
-    response.json(presentDraft(await designs.saveDraft(id, body, signedIn(request).person)))
+    response.json(await designs.saveDraft(id, body, signedIn(request).person))
   })
   return router
 }

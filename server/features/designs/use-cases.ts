@@ -1,27 +1,38 @@
 import type { AppContext } from '#server/context.ts'
-import type { Design } from '#server/db/models/design.ts'
-import type { Draft } from '#server/db/models/draft.ts'
+import type { Design as DesignRow } from '#server/db/models/design.ts'
 import type { Person } from '#server/db/models/person.ts'
-import { presentDraft } from '#server/features/designs/present.ts'
+import { presentPage } from '#server/db/paging.ts'
+import { presentDesign, presentDesignSummary, presentDraft } from '#server/features/designs/present.ts'
 import { designsRepository } from '#server/features/designs/repository.ts'
 import { conflict, invalid, notFound } from '#server/http/errors.ts'
 import { limits } from '#shared/limits.ts'
-import type { ChangeDesign, CreateDesign, ListDesigns, SaveDraft } from '#shared/schemas/design.ts'
+import type {
+  ChangeDesign,
+  CreateDesign,
+  Design,
+  DesignSummary,
+  Draft,
+  ListDesigns,
+  SaveDraft,
+} from '#shared/schemas/design.ts'
+import type { Page } from '#shared/schemas/paging.ts'
 import { startingDraft } from '#shared/starting-draft.ts'
 
+/** What can be done with designs and their drafts, in the shapes that are sent. */
 export function designsUseCases({ database, clock }: Pick<AppContext, 'database' | 'clock'>) {
   const designs = designsRepository({ database })
 
-  async function open(...[id, transaction]: Parameters<typeof designs.find>): Promise<Design> {
+  async function open(...[id, transaction]: Parameters<typeof designs.find>): Promise<DesignRow> {
     const design = await designs.find(id, transaction)
     if (!design) throw notFound('This design')
     return design
   }
 
   return {
-    list: (query: ListDesigns) => designs.page(query),
+    list: async (query: ListDesigns): Promise<Page<DesignSummary>> =>
+      presentPage(query, await designs.page(query), presentDesignSummary),
 
-    read: (id: number): Promise<Design> => open(id),
+    read: async (id: number): Promise<Design> => presentDesign(await open(id)),
 
     async create(
       { projectId, name, content = startingDraft }: CreateDesign,
@@ -32,7 +43,7 @@ export function designsUseCases({ database, clock }: Pick<AppContext, 'database'
           throw invalid([{ path: ['projectId'], message: 'This project does not exist.' }])
         return designs.create({ projectId, name, content }, person, clock(), transaction)
       })
-      return open(id)
+      return presentDesign(await open(id))
     },
 
     /** Renames, archives or restores. */
@@ -41,7 +52,7 @@ export function designsUseCases({ database, clock }: Pick<AppContext, 'database'
         const design = await open(id, transaction)
         if (name !== undefined) design.name = name
         if (archived !== undefined) design.archivedAt = archived ? (design.archivedAt ?? clock()) : null
-        return design.save({ transaction })
+        return presentDesign(await design.save({ transaction }))
       }),
 
     /** Makes a new design in the same project that begins with what the draft holds now. */
@@ -57,7 +68,7 @@ export function designsUseCases({ database, clock }: Pick<AppContext, 'database'
           transaction,
         )
       })
-      return open(copyId)
+      return presentDesign(await open(copyId))
     },
 
     /** Saves the draft if nobody saved it since the version that the edit began from; hands back theirs otherwise. */
@@ -70,7 +81,7 @@ export function designsUseCases({ database, clock }: Pick<AppContext, 'database'
           throw conflict('stale-draft', `${draft.saver!.name} saved this draft in the meantime.`, {
             members: { draft: presentDraft(draft) },
           })
-        return designs.saveDraft(draft, content, person, clock(), transaction)
+        return presentDraft(await designs.saveDraft(draft, content, person, clock(), transaction))
       }),
   }
 }

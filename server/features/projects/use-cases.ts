@@ -1,25 +1,30 @@
 import { UniqueConstraintError } from 'sequelize'
 import type { AppContext } from '#server/context.ts'
-import type { Project } from '#server/db/models/project.ts'
+import { presentProject } from '#server/features/projects/present.ts'
 import { projectsRepository } from '#server/features/projects/repository.ts'
 import { conflict, notFound } from '#server/http/errors.ts'
-import type { CreateProject } from '#shared/schemas/design.ts'
+import type { CreateProject, Project } from '#shared/schemas/design.ts'
 
+/** What can be done with projects, in the shapes that are sent. */
 export function projectsUseCases({ database, clock }: Pick<AppContext, 'database' | 'clock'>) {
   const projects = projectsRepository({ database })
 
   return {
-    list: () => projects.all(),
+    list: async (): Promise<Project[]> => (await projects.all()).map(presentProject),
 
     create: ({ name }: CreateProject): Promise<Project> =>
-      nameTakenAsConflict(() => database.write((transaction) => projects.create(name, clock(), transaction))),
+      nameTakenAsConflict(() =>
+        database.write(async (transaction) =>
+          presentProject(await projects.create(name, clock(), transaction)),
+        ),
+      ),
 
     rename: (id: number, { name }: CreateProject): Promise<Project> =>
       nameTakenAsConflict(() =>
         database.write(async (transaction) => {
           const project = await projects.find(id, transaction)
           if (!project) throw notFound('This project')
-          return project.update({ name, updatedAt: clock() }, { transaction })
+          return presentProject(await project.update({ name, updatedAt: clock() }, { transaction }))
         }),
       ),
   }

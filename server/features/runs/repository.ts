@@ -4,6 +4,7 @@ import type { ComputedRun } from '#server/compute/index.ts'
 import type { AppContext } from '#server/context.ts'
 import type { Design } from '#server/db/models/design.ts'
 import type { Run } from '#server/db/models/run.ts'
+import { rowsOf } from '#server/db/paging.ts'
 import { containsText } from '#server/db/search.ts'
 import type { CreateRun, ListRuns } from '#shared/schemas/run.ts'
 
@@ -48,9 +49,7 @@ export function runsRepository({ database }: Pick<AppContext, 'database'>) {
         where: conditions(query),
         include: names,
         order: ordering(query),
-        limit: query.pageSize,
-        offset: (query.page - 1) * query.pageSize,
-        subQuery: false,
+        ...rowsOf(query),
       }),
 
     find: (id: number): Promise<Run | null> => Run.findByPk(id, { include: names }),

@@ -1,12 +1,13 @@
 /** What can be done with runs. The computing stays outside the write queue: only its result is stored in there. */
 import { BusyError, ComputeError, type ComputedRun } from '#server/compute/index.ts'
 import type { AppContext } from '#server/context.ts'
+import type { Person } from '#server/db/models/person.ts'
 import type { Run as RunRow } from '#server/db/models/run.ts'
+import { presentPage } from '#server/db/paging.ts'
 import { presentRun, presentRunSummary } from '#server/features/runs/present.ts'
 import { runsRepository } from '#server/features/runs/repository.ts'
 import { HttpError, conflict, forbidden, invalid, notFound } from '#server/http/errors.ts'
 import { roleIncludes } from '#shared/roles.ts'
-import type { Person } from '#server/db/models/person.ts'
 import type { Page } from '#shared/schemas/paging.ts'
 import type { CreateRun, ListRuns, Run, RunSummary } from '#shared/schemas/run.ts'
 
@@ -58,9 +59,7 @@ export function runsUseCases(context: AppContext) {
     },
 
     async list(query: ListRuns): Promise<Page<RunSummary>> {
-      const { rows, count } = await repository.page(query)
-      const { page, pageSize } = query
-      return { items: rows.map(presentRunSummary), total: count, page, pageSize }
+      return presentPage(query, await repository.page(query), presentRunSummary)
     },
 
     async get(id: number): Promise<Run> {

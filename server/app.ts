@@ -7,7 +7,7 @@ import { designsRouter } from '#server/features/designs/routes.ts'
 import { healthRouter } from '#server/features/health/routes.ts'
 import { projectsRouter } from '#server/features/projects/routes.ts'
 import { runsRouter } from '#server/features/runs/routes.ts'
-import { sessionRouter, sessionsRouter, signInRouter } from '#server/features/session/routes.ts'
+import { sessionRouters } from '#server/features/session/routes.ts'
 import { authenticate } from '#server/http/authenticate.ts'
 import { clientFiles } from '#server/http/client-files.ts'
 import { requireCsrfToken, sameOriginOnly } from '#server/http/csrf.ts'
@@ -32,21 +32,22 @@ export function createApp(context: AppContext): Express {
   return app
 }
 
+/** Everything under /api. What stands before `authenticate` is open to strangers. */
 function apiRouter(context: AppContext): Router {
   const api = Router()
   api.use(limitRequests(context.config), noStore, sameOriginOnly, jsonOnly)
   api.use(express.json({ limit: limits.requestBody }), cookieParser())
 
   api.use('/health', healthRouter(context))
-  api.use('/session', signInRouter(context))
+  const { signIn, session, sessions } = sessionRouters(context)
+  api.use('/session', signIn)
 
   const signedInOnly = [authenticate(context), requireCsrfToken]
-  api.use('/session', signedInOnly, sessionRouter(context))
-  api.use('/sessions', signedInOnly, sessionsRouter(context))
+  api.use('/session', signedInOnly, session)
+  api.use('/sessions', signedInOnly, sessions)
   api.use('/account', signedInOnly, accountRouter(context))
   api.use('/projects', signedInOnly, projectsRouter(context))
   api.use('/designs', signedInOnly, designsRouter(context))
-
   api.use('/runs', signedInOnly, runsRouter(context))
 
   api.use(unknownPath)

@@ -8,10 +8,20 @@ import { limitSignIns } from '#server/http/rate-limit.ts'
 import { clearSessionCookie, setSessionCookie } from '#server/http/session-cookie.ts'
 import { signInSchema } from '#shared/schemas/account.ts'
 
+type UseCases = ReturnType<typeof sessionUseCases>
+
+/** The three routers around sign-ins, on one set of use cases: `signIn` alone is for strangers. */
+export function sessionRouters(context: AppContext): Record<'signIn' | 'session' | 'sessions', Router> {
+  const useCases = sessionUseCases(context)
+  return {
+    signIn: signInRouter(context, useCases),
+    session: sessionRouter(context, useCases),
+    sessions: sessionsRouter(context, useCases),
+  }
+}
+
 /** Signing in: the only change that somebody unknown may ask for. */
-export function signInRouter(context: AppContext): Router {
-  const { config } = context
-  const { signIn } = sessionUseCases(context)
+function signInRouter({ config }: AppContext, { signIn }: UseCases): Router {
   const router = Router()
   router.post('/', limitSignIns(config), async (request, response) => {
     const origin = { address: request.ip, userAgent: request.get('User-Agent') ?? '' }
@@ -23,9 +33,7 @@ export function signInRouter(context: AppContext): Router {
 }
 
 /** The session one is in: who, and its end. */
-export function sessionRouter(context: AppContext): Router {
-  const { config } = context
-  const { signOut } = sessionUseCases(context)
+function sessionRouter({ config }: AppContext, { signOut }: UseCases): Router {
   const router = Router()
   router.get('/', authorise('session.read'), (request, response) => {
     const { person, csrfToken } = signedIn(request)
@@ -40,12 +48,11 @@ export function sessionRouter(context: AppContext): Router {
 }
 
 /** All of a person's sessions: signing out everywhere. */
-export function sessionsRouter(context: AppContext): Router {
-  const { signOutEverywhere } = sessionUseCases(context)
+function sessionsRouter({ config }: AppContext, { signOutEverywhere }: UseCases): Router {
   const router = Router()
   router.delete('/', authorise('session.end'), async (request, response) => {
     await signOutEverywhere(signedIn(request))
-    clearSessionCookie(response, context.config)
+    clearSessionCookie(response, config)
     response.status(204).end()
   })
   return router

@@ -7,11 +7,12 @@ import { createSignInDelay } from '#server/identity/sign-in-delay.ts'
 import type { SignIn } from '#shared/schemas/account.ts'
 
 /** Where a sign-in comes from. */
-export interface Origin {
+interface Origin {
   address: string | undefined
   userAgent: string
 }
 
+/** Signing in and out. Holds the count of failed sign-ins: one set for the whole application. */
 export function sessionUseCases(context: AppContext) {
   const { config, database, clock } = context
   const sessions = createSessions(context)

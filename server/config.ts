@@ -2,20 +2,19 @@ import { randomBytes } from 'node:crypto'
 import { chmodSync, existsSync, readFileSync, writeFileSync } from 'node:fs'
 import { dirname, join, resolve } from 'node:path'
 import { z } from 'zod'
-import { isLoopbackName } from '#server/http/loopback.ts'
+import { isLoopbackName, withoutBrackets } from '#server/loopback.ts'
 import { makeFolder } from '#server/make-folder.ts'
 import { projectRoot } from '#server/root.ts'
 import { StartError } from '#server/start-error.ts'
 
+/** Fewest characters of a secret in production. */
 const secretLength = 32
 
 const portSentence = 'PORT must be a whole number from 0 to 65535.'
 const proxySentence = 'TRUST_PROXY must be the number of proxies in front, 0 to 10.'
 const modeSentence = 'NODE_ENV must be production, development, test or demo, or not be set.'
 
-/** An IPv6 address may be written as in a URL. */
-const withoutBrackets = (host: string) => host.replace(/^\[(.*)\]$/, '$1')
-
+/** A whole number from 0 to `greatest`, refused with the sentence `error`. */
 const whole = (error: string, greatest: number) =>
   z.coerce.number({ error }).int({ error }).min(0, { error }).max(greatest, { error })
 
@@ -87,6 +86,7 @@ export function readConfig(environment: NodeJS.ProcessEnv): Config {
   }
 }
 
+/** @throws StartError when it is missing or too short */
 function requireSecret(secret: string | undefined): string {
   if (secret && secret.length >= secretLength) return secret
   throw new StartError(

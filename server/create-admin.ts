@@ -10,7 +10,7 @@ import { z } from 'zod'
 import { readConfig, type Config } from '#server/config.ts'
 import { openDatabase } from '#server/db/database.ts'
 import { hashPassword } from '#server/identity/passwords.ts'
-import { StartError } from '#server/start-error.ts'
+import { endWith, StartError } from '#server/start-error.ts'
 import { limits } from '#shared/limits.ts'
 import { passwordSchema, signInSchema } from '#shared/schemas/account.ts'
 import { line } from '#shared/schemas/text.ts'
@@ -55,7 +55,4 @@ async function main(): Promise<void> {
   process.stdout.write(`${created} can now sign in as administrator.\n`)
 }
 
-main().catch((error: unknown) => {
-  process.stderr.write(`${error instanceof StartError ? error.message : (error as Error).stack}\n`)
-  process.exit(1)
-})
+main().catch(endWith)

@@ -7,7 +7,7 @@ import { openDatabase } from '#server/db/database.ts'
 import { demoAccounts, seedDemo } from '#server/db/demo/index.ts'
 import { createLog } from '#server/http/request-log.ts'
 import { runServer, type RunningServer } from '#server/run-server.ts'
-import { StartError } from '#server/start-error.ts'
+import { endWith } from '#server/start-error.ts'
 
 /** Longest wait for requests and writes under way when the process is told to stop, milliseconds. */
 const stopTimeout = 10_000
@@ -59,7 +59,4 @@ function stopOnSignal(server: RunningServer, log: Logger): void {
   process.on('SIGINT', stop)
 }
 
-start().catch((error: unknown) => {
-  process.stderr.write(`${error instanceof StartError ? error.message : (error as Error).stack}\n`)
-  process.exit(1)
-})
+start().catch(endWith)

@@ -1,6 +1,7 @@
 import { QueryTypes, type Sequelize, type Transaction } from 'sequelize'
 import { Umzug, type UmzugStorage } from 'umzug'
 import { migrations } from '#server/db/migrations/index.ts'
+import type { Migration } from '#server/db/migrations/migration.ts'
 
 /**
  * Applies and reverts the schema changes of `migrations/`. Each stands in one IMMEDIATE transaction together with the
@@ -16,12 +17,17 @@ export function createMigrator(sequelize: Sequelize) {
     return rows.map(({ name }) => name)
   }
 
-  /** Runs `statements` and `note` unless another process has brought `name` to the wanted state already. */
-  const run = (name: string, wanted: boolean, statements: readonly string[], note: string) =>
+  const notes = {
+    up: 'INSERT INTO migrations (name) VALUES (?)',
+    down: 'DELETE FROM migrations WHERE name = ?',
+  }
+
+  /** Takes one change that way and notes it, unless another process has done so already. */
+  const run = ({ name, ...migration }: Migration, way: 'up' | 'down') =>
     sequelize.transaction(async (transaction) => {
-      if ((await applied(transaction)).includes(name) === wanted) return
-      for (const statement of statements) await sequelize.query(statement, { transaction })
-      await sequelize.query(note, { transaction, replacements: [name] })
+      if ((await applied(transaction)).includes(name) === (way === 'up')) return
+      for (const statement of migration[way]) await sequelize.query(statement, { transaction })
+      await sequelize.query(notes[way], { transaction, replacements: [name] })
     })
 
   const storage: UmzugStorage = {
@@ -31,10 +37,10 @@ export function createMigrator(sequelize: Sequelize) {
     unlogMigration: () => Promise.resolve(),
   }
   const migrator = new Umzug({
-    migrations: migrations.map(({ name, up, down }) => ({
-      name,
-      up: () => run(name, true, up, 'INSERT INTO migrations (name) VALUES (?)'),
-      down: () => run(name, false, down, 'DELETE FROM migrations WHERE name = ?'),
+    migrations: migrations.map((migration) => ({
+      name: migration.name,
+      up: () => run(migration, 'up'),
+      down: () => run(migration, 'down'),
     })),
     storage,
     logger: undefined,

@@ -2,7 +2,7 @@ import type { RequestHandler } from 'express'
 import helmet from 'helmet'
 import type { Config } from '#server/config.ts'
 import { HttpError } from '#server/http/errors.ts'
-import { isLoopbackName } from '#server/http/loopback.ts'
+import { isLoopbackName } from '#server/loopback.ts'
 
 /** Security headers: everything comes from this origin, nothing is framed, no inline code or style. */
 export function securityHeaders({ mode, trustProxy }: Config): RequestHandler {

@@ -5,11 +5,12 @@ import { tooManyAttempts } from '#server/http/errors.ts'
 
 const minute = 60_000
 
-const perAddress = (windowMs: number, limit: number, failedOnly: boolean): RequestHandler =>
+/** @param counted which requests count against the limit */
+const perAddress = (windowMs: number, limit: number, counted: 'all' | 'failed'): RequestHandler =>
   rateLimit({
     windowMs,
     limit,
-    skipSuccessfulRequests: failedOnly,
+    skipSuccessfulRequests: counted === 'failed',
     standardHeaders: 'draft-8',
     legacyHeaders: false,
     handler: (request) => {
@@ -19,8 +20,8 @@ const perAddress = (windowMs: number, limit: number, failedOnly: boolean): Reque
   })
 
 /** Generous: stops a runaway client, never a working person. */
-export const limitRequests = ({ rates }: Config) => perAddress(minute, rates.requestsPerMinute, false)
+export const limitRequests = ({ rates }: Config) => perAddress(minute, rates.requestsPerMinute, 'all')
 
 /** Failed sign-ins of one address, whatever the account. */
 export const limitSignIns = ({ rates }: Config) =>
-  perAddress(15 * minute, rates.failedSignInsPerQuarterHour, true)
+  perAddress(15 * minute, rates.failedSignInsPerQuarterHour, 'failed')

@@ -1,7 +1,7 @@
 import { Op, type Transaction } from 'sequelize'
 import type { AppContext } from '#server/context.ts'
 import type { Person } from '#server/db/models/person.ts'
-import { isLoopbackAddress } from '#server/http/loopback.ts'
+import { isLoopbackAddress } from '#server/loopback.ts'
 import { sessionLife } from '#server/identity/session-life.ts'
 import { createTokens, hashSessionId, newSessionId } from '#server/identity/tokens.ts'
 

@@ -5,6 +5,5 @@ export interface Step {
   outputs?: string[]
   make: () => unknown
 }
-export function hashOf(paths: string[]): string
 export function isUpToDate(step: Step): boolean
 export function whenChanged(step: Step): Promise<boolean>

@@ -16,7 +16,7 @@ function filesBelow(path) {
 }
 
 /** One hash over the contents and names of files and folders. @param {string[]} paths */
-export function hashOf(paths) {
+function hashOf(paths) {
   const hash = createHash('sha256')
   for (const file of paths.flatMap(filesBelow))
     hash.update(file).update('\0').update(readFileSync(file)).update('\0')

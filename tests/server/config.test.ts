@@ -2,7 +2,7 @@ import { chmodSync, existsSync, readFileSync, statSync, writeFileSync } from 'no
 import { join } from 'node:path'
 import { afterAll, beforeAll, describe, expect, it } from 'vitest'
 import { readConfig } from '#server/config.ts'
-import { isLoopbackName } from '#server/http/loopback.ts'
+import { isLoopbackName } from '#server/loopback.ts'
 import { projectRoot } from '#server/root.ts'
 import { temporaryFolder } from '#tests/support/database.ts'
 

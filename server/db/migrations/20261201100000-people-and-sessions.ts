@@ -1,5 +1,6 @@
 import type { Migration } from '#server/db/migrations/migration.ts'
 
+/** Who may sign in, and their sign-ins. */
 export const peopleAndSessions: Migration = {
   name: '20261201100000-people-and-sessions',
   up: [

@@ -1,5 +1,6 @@
 import type { Migration } from '#server/db/migrations/migration.ts'
 
+/** Projects, designs, and the one draft of each. */
 export const designs: Migration = {
   name: '20261201100100-designs',
   up: [

@@ -11,8 +11,11 @@ export function isLoopbackAddress(address: string): boolean {
   return family !== 0 && loopback.check(address, family === 6 ? 'ipv6' : 'ipv4')
 }
 
+/** A host as it stands in a URL or a Host header without the brackets of an IPv6 literal. */
+export const withoutBrackets = (host: string) => host.replace(/^\[(.*)\]$/, '$1')
+
 /** Whether a host name or address, with or without the brackets of an IPv6 literal, is a loopback name. */
 export function isLoopbackName(host: string): boolean {
-  const bare = host.replace(/^\[(.*)\]$/, '$1').toLowerCase()
+  const bare = withoutBrackets(host).toLowerCase()
   return bare === 'localhost' || isLoopbackAddress(bare)
 }

@@ -43,6 +43,22 @@ describe('bad input on the sheet', () => {
     await page.context().close()
   })
 
+  it('covers no other field with the sentence, on a phone either', async () => {
+    const { page } = await openAs('engineer', '/designs/2/start-up', { width: 390 })
+    for (const label of ['series R', 'shunt C', 'feedback R', 'load']) {
+      await enter(page, label, '4q7')
+      const sentence = (await page.getByRole('alert').filter({ hasText: label }).boundingBox())!
+      const fields = page.getByRole('group', { name: 'Circuit', exact: true }).getByRole('textbox')
+      for (const field of await fields.all()) {
+        const box = (await field.boundingBox())!
+        const apart = box.y + box.height <= sentence.y || sentence.y + sentence.height <= box.y
+        expect(apart, `the sentence on ${label} lies apart from every field`).toBe(true)
+      }
+      await page.getByRole('button', { name: 'Undo', exact: true }).click()
+    }
+    await page.context().close()
+  })
+
   it('warns of an amplifier slower than the oscillator and still answers', async () => {
     const { page } = await openSheet()
     await page.getByText('Amplifier figures').click()

@@ -39,7 +39,7 @@ export function DesignSheet({ state, pages, actions, children }: DesignSheetProp
             <CautionList live={live} circuit={content.circuit} invalid={invalid} />
           </div>
           <div className="lg:col-start-1 lg:row-span-2 lg:row-start-1">
-            <CircuitCard live={live} />
+            <CircuitCard live={live} circuit={content.circuit} />
           </div>
           <div className="min-w-0 lg:col-start-2">{children}</div>
         </div>

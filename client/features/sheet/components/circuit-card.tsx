@@ -11,16 +11,23 @@ import { PowerOnSection } from '#client/features/sheet/components/power-on-secti
 import { RecordSection } from '#client/features/sheet/components/record-section.tsx'
 import { SupplySection } from '#client/features/sheet/components/supply-section.tsx'
 import type { LiveResult } from '#client/lib/live-result.ts'
+import type { Circuit } from '#shared/schemas/circuit.ts'
 
-export function CircuitCard({ live }: { live: LiveResult }) {
+export interface CircuitCardProps {
+  live: LiveResult
+  /** The last valid one, to which `live` belongs; the inputs themselves show what was typed. */
+  circuit: Circuit
+}
+
+export function CircuitCard({ live, circuit }: CircuitCardProps) {
   return (
     <Card role="group" aria-label="Circuit">
       <div className="py-3">
         <Bridge />
       </div>
       <CardSection title="Gain">
-        <GainTrim linear={live.smallSignal} />
-        <GainWords />
+        <GainTrim circuit={circuit} linear={live.smallSignal} />
+        <GainWords gain={circuit.gain} />
       </CardSection>
       <CardSection title="Network">
         <GangRow />

@@ -4,6 +4,7 @@ import type { ReactNode } from 'react'
 import { withFeedback } from '#client/features/sheet/amplitude-control.ts'
 import { useEditing } from '#client/features/sheet/editing-context.ts'
 import { trimRange, type TrimRange } from '#client/features/sheet/trim.ts'
+import type { Circuit } from '#shared/schemas/circuit.ts'
 import { formatPercent, formatQuantity } from '#shared/units/format.ts'
 import type { SmallSignal } from '#sim/types.ts'
 
@@ -41,10 +42,15 @@ const namedZones = (range: TrimRange) =>
     (zone, index, all) => index === 0 || index === all.length - 1 || 1 - zone.from >= roomForTwo,
   )
 
-/** @param linear of the present circuit; null while there is none */
-export function GainTrim({ linear }: { linear: SmallSignal | null }) {
-  const { content, readOnly, edit, seal } = useEditing()
-  const { circuit } = content
+export interface GainTrimProps {
+  /** The last valid one, to which `linear` belongs. */
+  circuit: Circuit
+  /** Null while there is none. */
+  linear: SmallSignal | null
+}
+
+export function GainTrim({ circuit, linear }: GainTrimProps) {
+  const { readOnly, edit, seal } = useEditing()
   const range = linear && trimRange(circuit, linear)
   if (!linear || !range)
     return (

@@ -1,11 +1,9 @@
 /** The two numbers that are so easily taken for one another, each with its own words. */
-import { useEditing } from '#client/features/sheet/editing-context.ts'
+import type { Circuit } from '#shared/schemas/circuit.ts'
 import { formatNumber, formatQuantity } from '#shared/units/format.ts'
 
-export function GainWords() {
-  const { gain } = useEditing().content.circuit
+export function GainWords({ gain }: Pick<Circuit, 'gain'>) {
   const ratio = gain.feedbackR / gain.groundR
-  if (!Number.isFinite(ratio)) return null
   return (
     <dl className="grid grid-cols-2 gap-x-4 text-sm">
       <div>

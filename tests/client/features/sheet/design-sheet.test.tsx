@@ -114,6 +114,30 @@ describe('typing values', () => {
     expect(await screen.findByText('not saved: mend the marked field', {}, { timeout: 3000 })).toBeVisible()
   })
 
+  it('lists what is wrong in the drawing under it, each sentence with its part', async () => {
+    const { user, container } = await renderSheet()
+    await user.clear(field('feedback R'))
+    await user.type(field('feedback R'), '4q7')
+    await user.clear(field('ground R'))
+    await user.type(field('ground R'), '0')
+    const list = screen.getByRole('list', { name: 'Values to mend in the drawing' })
+    expect(
+      within(list)
+        .getAllByRole('alert')
+        .map((one) => one.textContent),
+    ).toEqual([
+      'feedback R: “4q7” is not a number with a prefix such as 4k7, 100n or 0.1u.',
+      'Ground R must be greater than zero.',
+    ])
+    // Trim and gain stay with the last valid circuit, as everything that is computed does.
+    expect(screen.getByText('Closed-loop gain').closest('div')).toHaveTextContent('3.05')
+    expect(screen.queryByText('no gain sustains this loop')).toBeNull()
+    expect(await axeViolations(container)).toEqual([])
+    await user.clear(field('feedback R'))
+    await user.type(field('feedback R'), '21k')
+    expect(within(list).getAllByRole('alert')).toHaveLength(1)
+  })
+
   it('shows the schema’s refusals at the field', async () => {
     const { user } = await renderSheet()
     await user.clear(field('series R'))

@@ -1,15 +1,8 @@
 /** The whole job in a real browser: an engineer proves a design and saves the run, a reviewer replays it. */
-import type { Page } from 'playwright-core'
 import { describe, expect, it } from 'vitest'
-import { enter, serveForTests, verdictLine } from '#tests/support/e2e.ts'
+import { enter, figure, serveForTests } from '#tests/support/e2e.ts'
 
 const { openAs } = serveForTests()
-
-/** A figure of the verdict line as shown, number only. */
-async function figure(page: Page, name: string): Promise<string> {
-  const rows = (await verdictLine(page)).split('\n').map((row) => row.trim())
-  return rows[rows.indexOf(name) + 1] ?? ''
-}
 
 describe('from power-on to a replayed run', () => {
   it('lets an engineer make a design, prove it and save the run, and a reviewer replay it', async () => {

@@ -49,3 +49,9 @@ export async function enter(page: Page, label: string, text: string): Promise<vo
 export function verdictLine(page: Page): Promise<string> {
   return page.locator('dl[aria-label="Figures"]').innerText()
 }
+
+/** A figure of the verdict line as shown, number first; `–` while there is none. */
+export async function figure(page: Page, name: string): Promise<string> {
+  const rows = (await verdictLine(page)).split('\n').map((row) => row.trim())
+  return rows[rows.indexOf(name) + 1] ?? ''
+}

@@ -2,6 +2,7 @@ import { Button } from '#client/components/ui/button.tsx'
 import { AccountPage } from '#client/features/account/account-page.tsx'
 import { useSignOut } from '#client/features/session/hooks/use-sign-out.ts'
 
+/** /account, with the ways out that the session has. */
 export function Component() {
   const signOut = useSignOut()
   const under = (where: 'here' | 'everywhere') => signOut.isPending && signOut.variables === where

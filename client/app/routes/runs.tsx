@@ -1,1 +1,2 @@
+/** /runs */
 export { RunListPage as Component } from '#client/features/runs/run-list-page.tsx'

@@ -1,18 +1,16 @@
 import { Button } from '#client/components/ui/button.tsx'
+import type { Page } from '#shared/schemas/paging.ts'
 
 export interface PagerProps {
-  /** From 1. */
-  page: number
-  pageSize: number
-  /** Items over all pages. */
-  total: number
+  /** The page that is shown, of whatever items. */
+  list: Pick<Page<unknown>, 'page' | 'pageSize' | 'total'>
   onPage: (page: number) => void
   /** What is counted, in the plural: "designs". */
   noun: string
 }
 
 /** Steps through a list page by page and says where one is. */
-export function Pager({ page, pageSize, total, onPage, noun }: PagerProps) {
+export function Pager({ list: { page, pageSize, total }, onPage, noun }: PagerProps) {
   const pages = Math.max(1, Math.ceil(total / pageSize))
   const first = total === 0 ? 0 : (page - 1) * pageSize + 1
   const last = Math.min(total, page * pageSize)

@@ -54,13 +54,7 @@ export function DesignsPage() {
               mayEdit={mayEdit}
             />
             <div className="border-t border-hair px-4 py-2.5">
-              <Pager
-                noun="designs"
-                page={list.data.page}
-                pageSize={list.data.pageSize}
-                total={list.data.total}
-                onPage={(page) => change({ page })}
-              />
+              <Pager noun="designs" list={list.data} onPage={(page) => change({ page })} />
             </div>
           </>
         )}

@@ -72,13 +72,7 @@ export function RunListPage() {
       </Card>
       {list.data && rows.length > 0 && (
         <div className="pt-3">
-          <Pager
-            noun="runs"
-            page={list.data.page}
-            pageSize={list.data.pageSize}
-            total={list.data.total}
-            onPage={(page) => change({ page })}
-          />
+          <Pager noun="runs" list={list.data} onPage={(page) => change({ page })} />
         </div>
       )}
     </>

@@ -10,6 +10,7 @@ import { showProblem } from '#client/lib/form-problem.ts'
 import { limits } from '#shared/limits.ts'
 import { changePasswordSchema, type ChangePassword } from '#shared/schemas/account.ts'
 
+/** Asks for the current password and a new one; says when it is changed. */
 export function PasswordForm() {
   const form = useForm({
     resolver: zodResolver(changePasswordSchema),

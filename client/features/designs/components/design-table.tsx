@@ -75,6 +75,7 @@ function columnsFor(mayEdit: boolean): ColumnDef<DesignSummary, unknown>[] {
   return columns
 }
 
+/** The list of designs; what can be done to one is there only for those who may edit. */
 export function DesignTable({ designs, sort, onSort, stale, mayEdit }: DesignTableProps) {
   const columns = useMemo(() => columnsFor(mayEdit), [mayEdit])
   return (

@@ -14,6 +14,7 @@ export interface FiltersProps {
   change: (part: Partial<ListDesigns>) => void
 }
 
+/** Search and filters of the list of designs; with a project chosen, the way to rename it. */
 export function Filters({ params, change }: FiltersProps) {
   const [text, setText] = useSearchText(params.search, (search) => change({ search }))
   const projects = useQuery(projectQueries.list())

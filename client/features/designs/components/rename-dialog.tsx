@@ -3,6 +3,7 @@ import type { DesignDialogProps } from '#client/features/designs/components/arch
 import { NameDialog } from '#client/features/designs/components/name-dialog.tsx'
 import { useChangeDesign } from '#client/features/designs/hooks/use-design-changes.ts'
 
+/** Gives a design another name. */
 export function RenameDialog({ design, open, onOpenChange }: DesignDialogProps) {
   const change = useChangeDesign(design.id)
   const say = useStatus()

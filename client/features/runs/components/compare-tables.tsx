@@ -2,7 +2,7 @@
 import { Fragment, useState } from 'react'
 import { Checkbox } from '#client/components/ui/checkbox.tsx'
 import { Section } from '#client/features/runs/components/section.tsx'
-import { Cell, GroupRow, PlainTable, RowHead } from '#client/features/runs/components/table-parts.tsx'
+import { Cell, GroupRow, PlainTable, RowHead } from '#client/components/ui/plain-table.tsx'
 import { compareFigures, compareInputs } from '#client/features/runs/lib/compare-runs.ts'
 import { formatDifference, formatShare } from '#client/features/runs/lib/format-difference.ts'
 import { figure } from '#shared/figures.ts'

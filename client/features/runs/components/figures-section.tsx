@@ -1,5 +1,6 @@
 import { Section } from '#client/features/runs/components/section.tsx'
-import { Cell, Outcome, PlainTable, RowHead } from '#client/features/runs/components/table-parts.tsx'
+import { Cell, PlainTable, RowHead } from '#client/components/ui/plain-table.tsx'
+import { Outcome } from '#client/features/runs/components/outcome.tsx'
 import { formatDifference } from '#client/features/runs/lib/format-difference.ts'
 import { figureDefinitions, type FigureKey } from '#shared/figures.ts'
 import type { FigureComparison } from '#shared/replay.ts'

@@ -1,13 +1,12 @@
 import { Section } from '#client/features/runs/components/section.tsx'
-import { Cell, PlainTable, RowHead } from '#client/features/runs/components/table-parts.tsx'
+import { harmonicRows } from '#client/components/charts/harmonic-rows.ts'
+import { Cell, PlainTable, RowHead } from '#client/components/ui/plain-table.tsx'
 import { formatPercent, formatQuantity } from '#shared/units/format.ts'
-import type { Complex, SettledTone } from '#sim/types.ts'
-
-const magnitude = ({ re, im }: Complex) => Math.hypot(re, im)
+import type { SettledTone } from '#sim/types.ts'
 
 /** Harmonics of the settled tone. They are not stored with a run: a replay gives them. */
 export function HarmonicsSection({ tone }: { tone: SettledTone }) {
-  const fundamental = tone.harmonics[0] ? magnitude(tone.harmonics[0]) : 0
+  const rows = harmonicRows(tone.harmonics, tone.frequency)
   return (
     <Section
       title="Harmonics of the output"
@@ -17,12 +16,12 @@ export function HarmonicsSection({ tone }: { tone: SettledTone }) {
         caption="Harmonics of the output"
         heads={['Harmonic', 'Frequency', 'Level, peak', 'Of the fundamental']}
       >
-        {tone.harmonics.map((harmonic, index) => (
-          <tr key={index}>
-            <RowHead>{index === 0 ? 'fundamental' : `${index + 1}`}</RowHead>
-            <Cell>{formatQuantity((index + 1) * tone.frequency, 'Hz', { digits: 5 })}</Cell>
-            <Cell>{formatQuantity(magnitude(harmonic), 'V')}</Cell>
-            <Cell>{formatPercent(magnitude(harmonic) / fundamental, { digits: 3 })}</Cell>
+        {rows.map(({ order, frequency, level, ratio }) => (
+          <tr key={order}>
+            <RowHead>{order === 1 ? 'fundamental' : order}</RowHead>
+            <Cell>{formatQuantity(frequency, 'Hz', { digits: 5 })}</Cell>
+            <Cell>{formatQuantity(level, 'V')}</Cell>
+            <Cell>{formatPercent(ratio, { digits: 3 })}</Cell>
           </tr>
         ))}
       </PlainTable>

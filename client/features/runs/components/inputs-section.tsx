@@ -1,6 +1,6 @@
 import { Fragment } from 'react'
 import { Section } from '#client/features/runs/components/section.tsx'
-import { Cell, GroupRow, PlainTable, RowHead } from '#client/features/runs/components/table-parts.tsx'
+import { Cell, GroupRow, PlainTable, RowHead } from '#client/components/ui/plain-table.tsx'
 import { inputRows } from '#client/features/runs/lib/input-rows.ts'
 import type { RunInputs } from '#shared/schemas/simulation.ts'
 

@@ -1,5 +1,6 @@
 import { Notice } from '#client/components/ui/notice.tsx'
-import { Cell, Outcome, PlainTable, RowHead } from '#client/features/runs/components/table-parts.tsx'
+import { Cell, PlainTable, RowHead } from '#client/components/ui/plain-table.tsx'
+import { Outcome } from '#client/features/runs/components/outcome.tsx'
 import { formatShare } from '#client/features/runs/lib/format-difference.ts'
 import { replayVerdict } from '#client/features/runs/lib/replay-verdict.ts'
 import { waveformTolerance, type ReplayComparison } from '#shared/replay.ts'

@@ -1,7 +1,7 @@
 /** Whether the two arms are edited as one, how far apart they are, and the series that arrow keys follow. */
 import { Field } from '#client/components/ui/field.tsx'
 import { Select } from '#client/components/ui/select.tsx'
-import { Choice } from '#client/features/sheet/components/choice.tsx'
+import { Choice } from '#client/components/ui/choice.tsx'
 import { useEditing } from '#client/features/sheet/editing-context.ts'
 import { mismatch, withGang } from '#client/features/sheet/gang.ts'
 import { formatPercent } from '#shared/units/format.ts'

@@ -1,6 +1,6 @@
 /** What sets the oscillator going. */
 import { CardSection, FieldGrid } from '#client/features/sheet/components/card-section.tsx'
-import { Choice } from '#client/features/sheet/components/choice.tsx'
+import { Choice } from '#client/components/ui/choice.tsx'
 import { SheetField } from '#client/features/sheet/components/sheet-field.tsx'
 import { stimulusNames } from '#client/features/sheet/differences.ts'
 import { useEditing } from '#client/features/sheet/editing-context.ts'

@@ -1,6 +1,6 @@
 /** Rails, split or single with a reference, and what the output keeps away from them. */
 import { CardSection, FieldGrid } from '#client/features/sheet/components/card-section.tsx'
-import { Choice } from '#client/features/sheet/components/choice.tsx'
+import { Choice } from '#client/components/ui/choice.tsx'
 import { SheetField } from '#client/features/sheet/components/sheet-field.tsx'
 import { useEditing } from '#client/features/sheet/editing-context.ts'
 import { isSingle, withSupplyKind } from '#client/features/sheet/supply.ts'

@@ -1,6 +1,7 @@
 import { Button } from '#client/components/ui/button.tsx'
 import type { UndoState } from '#client/features/sheet/hooks/use-sheet.ts'
 
+/** The way back over the edits of this visit, and forth again. */
 export function UndoButtons({ undo, redo, canUndo, canRedo }: UndoState) {
   return (
     <>

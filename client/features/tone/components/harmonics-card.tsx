@@ -3,9 +3,9 @@ import { useMemo, useState } from 'react'
 import { SpectrumChart } from '#client/components/charts/spectrum-chart.tsx'
 import type { LevelScale } from '#client/components/charts/spectrum-levels.ts'
 import { Card } from '#client/components/ui/card.tsx'
+import { Choice } from '#client/components/ui/choice.tsx'
 import { HarmonicTable } from '#client/features/tone/components/harmonic-table.tsx'
-import { ToneChoice } from '#client/features/tone/components/tone-choice.tsx'
-import { harmonicRows } from '#client/features/tone/lib/harmonic-rows.ts'
+import { harmonicRows } from '#client/components/charts/harmonic-rows.ts'
 import { figure } from '#shared/figures.ts'
 import type { SettledTone } from '#sim/types.ts'
 
@@ -24,22 +24,24 @@ export function HarmonicsCard({ tone }: { tone: SettledTone }) {
       <div className="flex flex-wrap items-center gap-x-5 gap-y-1 px-4 pt-3 pb-1">
         <h2 className="text-base font-medium">Harmonics at {place}</h2>
         <div className="ml-auto flex flex-wrap gap-x-5">
-          <ToneChoice
+          <Choice
             legend="Node"
+            legendHidden
             value={node}
             onChange={setNode}
             options={[
-              ['output', 'Output'],
-              ['network', 'Network node'],
+              { value: 'output', label: 'Output' },
+              { value: 'network', label: 'Network node' },
             ]}
           />
-          <ToneChoice
+          <Choice
             legend="Levels"
+            legendHidden
             value={scale}
             onChange={setScale}
             options={[
-              ['decibel', 'dB'],
-              ['percent', '%'],
+              { value: 'decibel', label: 'dB' },
+              { value: 'percent', label: '%' },
             ]}
           />
         </div>

@@ -55,18 +55,20 @@ describe('Notice', () => {
 describe('Pager', () => {
   it('counts, and ends at both ends', async () => {
     const onPage = vi.fn()
-    const { rerender } = render(<Pager noun="runs" page={1} pageSize={20} total={41} onPage={onPage} />)
+    const { rerender } = render(
+      <Pager noun="runs" list={{ page: 1, pageSize: 20, total: 41 }} onPage={onPage} />,
+    )
     expect(screen.getByText('1–20 of 41 runs')).toBeInTheDocument()
     expect(screen.getByRole('button', { name: 'Previous' })).toBeDisabled()
     await userEvent.click(screen.getByRole('button', { name: 'Next' }))
     expect(onPage).toHaveBeenCalledWith(2)
-    rerender(<Pager noun="runs" page={3} pageSize={20} total={41} onPage={onPage} />)
+    rerender(<Pager noun="runs" list={{ page: 3, pageSize: 20, total: 41 }} onPage={onPage} />)
     expect(screen.getByText('41–41 of 41 runs')).toBeInTheDocument()
     expect(screen.getByRole('button', { name: 'Next' })).toBeDisabled()
   })
 
   it('needs no buttons for one page', () => {
-    render(<Pager noun="runs" page={1} pageSize={20} total={0} onPage={() => undefined} />)
+    render(<Pager noun="runs" list={{ page: 1, pageSize: 20, total: 0 }} onPage={() => undefined} />)
     expect(screen.getByText('0–0 of 0 runs')).toBeInTheDocument()
     expect(screen.queryByRole('button')).not.toBeInTheDocument()
   })

@@ -1,4 +1,4 @@
-/** The plain tables of the runs pages: one look for figures, inputs and comparisons. */
+/** Plain tables of numbers: one look for figures, harmonics, inputs and comparisons. */
 import type { ReactNode } from 'react'
 import { classNames } from '#client/components/ui/class-names.ts'
 
@@ -31,6 +31,7 @@ export function PlainTable({ caption, heads, children }: PlainTableProps) {
   )
 }
 
+/** Names the row; `note` explains it below. */
 export function RowHead({ children, note }: { children: ReactNode; note?: string }) {
   return (
     <th scope="row" className="min-w-34 px-4 py-1.5 sm:min-w-40 text-left align-baseline font-normal">
@@ -46,6 +47,7 @@ export interface CellProps {
   wrap?: boolean
 }
 
+/** One value, set right. */
 export function Cell({ children, strong = false, wrap = false }: CellProps) {
   return (
     <td
@@ -69,9 +71,4 @@ export function GroupRow({ children, columns }: { children: ReactNode; columns: 
       </th>
     </tr>
   )
-}
-
-/** Pass or fail, with a sign and a word beside the colour. */
-export function Outcome({ passes }: { passes: boolean }) {
-  return passes ? <span className="text-ok">✓ passes</span> : <span className="text-bad">✕ fails</span>
 }

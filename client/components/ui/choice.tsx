@@ -3,15 +3,18 @@ import { classNames } from '#client/components/ui/class-names.ts'
 
 export interface ChoiceProps<Value extends string> {
   legend: string
+  /** Keeps the legend for screen readers only. */
+  legendHidden?: boolean
   value: Value
   options: readonly { value: Value; label: string }[]
   onChange: (value: Value) => void
   disabled?: boolean
 }
 
-/** One of a few, side by side. */
+/** One of a few, side by side: radio buttons in a row. */
 export function Choice<Value extends string>({
   legend,
+  legendHidden = false,
   value,
   options,
   onChange,
@@ -20,7 +23,7 @@ export function Choice<Value extends string>({
   const name = useId()
   return (
     <fieldset disabled={disabled} className="min-w-0">
-      <legend className="mb-1 text-sm font-medium">{legend}</legend>
+      <legend className={legendHidden ? 'sr-only' : 'mb-1 text-sm font-medium'}>{legend}</legend>
       <div className="flex rounded-md border border-edge bg-card p-0.5">
         {options.map((option) => (
           <label

@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest'
-import { harmonicRows } from '#client/features/tone/lib/harmonic-rows.ts'
+import { harmonicRows } from '#client/components/charts/harmonic-rows.ts'
 
 /**
  * Fourier series of a square wave of height ±1 that rises at t = 0: odd harmonics 4/(πk), sines, nothing else

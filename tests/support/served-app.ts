@@ -20,7 +20,7 @@ export interface ServedApp {
 }
 
 /** A port that was free a moment ago. */
-export async function freePort(): Promise<number> {
+async function freePort(): Promise<number> {
   const server = createServer().listen(0, '127.0.0.1')
   await once(server, 'listening')
   const address = server.address()

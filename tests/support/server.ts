@@ -11,7 +11,7 @@ import { createFactories, testBcryptCost } from '#tests/support/factories.ts'
 import type { Role } from '#shared/roles.ts'
 
 /** Configuration of a test server: demo mode, a free port, limits out of the way, quick hashes. */
-export function testConfig(databaseFile: string, changes: Partial<Config> = {}): Config {
+function testConfig(databaseFile: string, changes: Partial<Config> = {}): Config {
   return {
     mode: 'demo',
     host: '127.0.0.1',

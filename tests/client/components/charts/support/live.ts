@@ -3,7 +3,8 @@ import type { LiveResult } from '#client/lib/live-result.ts'
 import { startingDraft } from '#shared/starting-draft.ts'
 import { simulate, smallSignal, type Simulation } from '#sim/index.ts'
 
-export const sampleInterval = 10e-6
+/** s. */
+const sampleInterval = 10e-6
 
 /** The starting circuit with another feedback R (Ω), over `duration` s from a kick that keeps the start short. */
 export function computed(feedbackR: number, duration: number): LiveResult & { simulation: Simulation } {

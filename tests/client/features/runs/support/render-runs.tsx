@@ -8,17 +8,12 @@ import { EngineContext, type EngineClient } from '#client/lib/engine-context.ts'
 import { createQueryClient } from '#client/lib/query-client.ts'
 import { sessionQueries } from '#client/lib/session.ts'
 import type { Person } from '#shared/schemas/account.ts'
-import type { Problem } from '#shared/schemas/problem.ts'
 import { engineer } from '#tests/client/features/runs/support/runs.ts'
 
 /** Answers by "METHOD /path"; a function is asked with the request's body. */
 export type Answers = Record<string, Response | ((body: string | undefined) => Response | Promise<Response>)>
 
-export const json = (body: unknown, status = 200) =>
-  new Response(JSON.stringify(body), { status, headers: { 'Content-Type': 'application/json' } })
-
-export const problem = (status: number, code: string, more: Partial<Problem> = {}) =>
-  json({ type: 'about:blank', title: code, status, code, ...more }, status)
+export { answer as json, problem } from '#tests/support/fake-api.ts'
 
 /** Puts a server of `answers` in the place of fetch; paths without an answer cannot be reached. */
 export function serve(answers: Answers) {

@@ -1,3 +1,5 @@
+import type { AmplitudeControl } from '#shared/schemas/circuit.ts'
+
 /** Where a figure is taken from. */
 export type FigureSource = 'smallSignal' | 'record' | 'settled'
 
@@ -226,3 +228,9 @@ export function figure(key: FigureKey): FigureDefinition & { key: FigureKey } {
   if (!found) throw new RangeError(`no figure ${key}`)
   return found
 }
+
+/**
+ * Share of the settled period above which a limit is said to act. Beside a device that holds the level a brief touch is
+ * not worth a word; without one, it is what stops the growth, however brief.
+ */
+export const countedShare = (control: AmplitudeControl['kind']): number => (control === 'none' ? 0 : 1e-4)

@@ -5,7 +5,7 @@ export interface PagerProps {
   /** The page that is shown, of whatever items. */
   list: Pick<Page<unknown>, 'page' | 'pageSize' | 'total'>
   onPage: (page: number) => void
-  /** What is counted, in the plural: "designs". */
+  /** What is counted, one of it: "design". */
   noun: string
 }
 
@@ -14,13 +14,14 @@ export function Pager({ list: { page, pageSize, total }, onPage, noun }: PagerPr
   const pages = Math.max(1, Math.ceil(total / pageSize))
   const first = total === 0 ? 0 : (page - 1) * pageSize + 1
   const last = Math.min(total, page * pageSize)
+  const range = first === last ? first : `${first}–${last}`
   return (
     <nav
-      aria-label={`Pages of ${noun}`}
+      aria-label={`Pages of ${noun}s`}
       className="flex flex-wrap items-center justify-between gap-3 text-sm"
     >
       <p className="text-soft">
-        {first}–{last} of {total} {noun}
+        {range} of {total} {total === 1 ? noun : `${noun}s`}
       </p>
       {pages > 1 && (
         <div className="flex items-center gap-2">

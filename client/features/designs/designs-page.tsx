@@ -54,7 +54,7 @@ export function DesignsPage() {
               mayEdit={mayEdit}
             />
             <div className="border-t border-hair px-4 py-2.5">
-              <Pager noun="designs" list={list.data} onPage={(page) => change({ page })} />
+              <Pager noun="design" list={list.data} onPage={(page) => change({ page })} />
             </div>
           </>
         )}

@@ -72,7 +72,7 @@ export function RunListPage() {
       </Card>
       {list.data && rows.length > 0 && (
         <div className="pt-3">
-          <Pager noun="runs" list={list.data} onPage={(page) => change({ page })} />
+          <Pager noun="run" list={list.data} onPage={(page) => change({ page })} />
         </div>
       )}
     </>

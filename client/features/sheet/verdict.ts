@@ -1,6 +1,6 @@
 /** The answer in a sentence: does it start, how fast, and what stops the growth? */
 import { criticalFeedback } from '#client/features/sheet/trim.ts'
-import type { Figures } from '#shared/figures.ts'
+import { countedShare, type Figures } from '#shared/figures.ts'
 import type { Circuit } from '#shared/schemas/circuit.ts'
 import { formatNumber, formatPercent, formatQuantity } from '#shared/units/format.ts'
 import type { SmallSignal } from '#sim/types.ts'
@@ -23,23 +23,21 @@ const percent = (ratio: number) => formatPercent(ratio, { digits: 2 })
 /** The gain margin with the digits of the verdict line, so that both say one thing. */
 const margin = (ratio: number) => formatPercent(Math.abs(ratio), { digits: 3 })
 
-/** A share of the settled time that is worth a word. */
-const noticeable = 1e-4
-
 function holder(circuit: Circuit, figures: Figures): { who: string; how: string } | null {
   const share = (...keys: ('heldHigh' | 'heldLow' | 'slewUp' | 'slewDown')[]) =>
     keys.reduce((sum, key) => sum + (figures[key] ?? 0), 0)
-  const held = share('heldHigh', 'heldLow') > noticeable
   const kind = circuit.amplitudeControl.kind
+  const counted = countedShare(kind)
+  const held = share('heldHigh', 'heldLow') > counted
   if (kind !== 'none' && !held)
     return kind === 'lamp'
       ? { who: 'lamp', how: 'holds the level' }
       : { who: 'diodes', how: 'hold the level' }
   if (held) {
-    const only = share('heldLow') <= noticeable ? 'upper ' : share('heldHigh') <= noticeable ? 'lower ' : ''
+    const only = share('heldLow') <= counted ? 'upper ' : share('heldHigh') <= counted ? 'lower ' : ''
     return only ? { who: `${only}rail`, how: 'stops the growth' } : { who: 'rails', how: 'stop the growth' }
   }
-  if (share('slewUp', 'slewDown') > noticeable) return { who: 'slew rate', how: 'stops the growth' }
+  if (share('slewUp', 'slewDown') > counted) return { who: 'slew rate', how: 'stops the growth' }
   return null
 }
 

@@ -40,7 +40,7 @@ function runsLink(design: DesignSummary) {
   return (
     <Link
       to={`/runs?designId=${design.id}`}
-      aria-label={`${design.runs} runs of ${design.name}`}
+      aria-label={`${design.runs} ${design.runs === 1 ? 'run' : 'runs'} of ${design.name}`}
       className="inline-flex min-h-8 min-w-8 items-center justify-end text-petrol hover:underline"
     >
       {design.runs}

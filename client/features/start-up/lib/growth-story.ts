@@ -1,7 +1,7 @@
 /** Says in words what stops the growth, or why there is none. */
 import { formatNumber, formatPercent, formatQuantity } from '#shared/units/format.ts'
 import type { AmplitudeControl } from '#shared/schemas/circuit.ts'
-import type { Figures } from '#shared/figures.ts'
+import { countedShare, type Figures } from '#shared/figures.ts'
 import type { Simulation, SmallSignal } from '#sim/types.ts'
 
 export interface GrowthStory {
@@ -18,12 +18,13 @@ export interface GrowthFacts {
 const share = (ratio: number) => formatPercent(ratio, { digits: 3 })
 const volts = (value: number) => formatQuantity(value, 'V', { digits: 3 })
 
-/** Share of the settled period; null figures count as none. */
-function shares(figures: Figures) {
+/** Shares of the settled period; what does not exist or acts for less than the share that counts is none. */
+function shares(control: AmplitudeControl['kind'], { heldHigh, heldLow, slewUp, slewDown }: Figures) {
+  const noticed = (ratio: number) => (ratio > countedShare(control) ? ratio : 0)
   return {
-    high: figures.heldHigh ?? 0,
-    low: figures.heldLow ?? 0,
-    slew: (figures.slewUp ?? 0) + (figures.slewDown ?? 0),
+    high: noticed(heldHigh ?? 0),
+    low: noticed(heldLow ?? 0),
+    slew: noticed((slewUp ?? 0) + (slewDown ?? 0)),
   }
 }
 
@@ -57,7 +58,7 @@ const devices: Record<
 const clear = 'It stays clear of the rails.'
 
 function settledStory(control: AmplitudeControl['kind'], figures: Figures): GrowthStory {
-  const { high, low, slew } = shares(figures)
+  const { high, low, slew } = shares(control, figures)
   const held = high + low > 0
   const level = figures.level === null ? [] : [`The output settles at ${volts(figures.level)} peak.`]
   const limits = [

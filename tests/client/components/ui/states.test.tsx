@@ -56,20 +56,25 @@ describe('Pager', () => {
   it('counts, and ends at both ends', async () => {
     const onPage = vi.fn()
     const { rerender } = render(
-      <Pager noun="runs" list={{ page: 1, pageSize: 20, total: 41 }} onPage={onPage} />,
+      <Pager noun="run" list={{ page: 1, pageSize: 20, total: 41 }} onPage={onPage} />,
     )
     expect(screen.getByText('1–20 of 41 runs')).toBeInTheDocument()
     expect(screen.getByRole('button', { name: 'Previous' })).toBeDisabled()
     await userEvent.click(screen.getByRole('button', { name: 'Next' }))
     expect(onPage).toHaveBeenCalledWith(2)
-    rerender(<Pager noun="runs" list={{ page: 3, pageSize: 20, total: 41 }} onPage={onPage} />)
-    expect(screen.getByText('41–41 of 41 runs')).toBeInTheDocument()
+    rerender(<Pager noun="run" list={{ page: 3, pageSize: 20, total: 41 }} onPage={onPage} />)
+    expect(screen.getByText('41 of 41 runs')).toBeInTheDocument()
     expect(screen.getByRole('button', { name: 'Next' })).toBeDisabled()
   })
 
+  it('counts one as one', () => {
+    render(<Pager noun="run" list={{ page: 1, pageSize: 20, total: 1 }} onPage={() => undefined} />)
+    expect(screen.getByText('1 of 1 run')).toBeInTheDocument()
+  })
+
   it('needs no buttons for one page', () => {
-    render(<Pager noun="runs" list={{ page: 1, pageSize: 20, total: 0 }} onPage={() => undefined} />)
-    expect(screen.getByText('0–0 of 0 runs')).toBeInTheDocument()
+    render(<Pager noun="run" list={{ page: 1, pageSize: 20, total: 0 }} onPage={() => undefined} />)
+    expect(screen.getByText('0 of 0 runs')).toBeInTheDocument()
     expect(screen.queryByRole('button')).not.toBeInTheDocument()
   })
 })

@@ -35,6 +35,13 @@ describe('growthStory', () => {
     expect(story({ heldHigh: 0.1 }).text).toContain('never reaches the lower one')
   })
 
+  it('does not speak of a limit that acts for a share nobody would notice', () => {
+    const { headline, text } = story({ heldHigh: 5e-5 }, { control: 'diodes' })
+    expect(headline).toBe('The diodes stop the growth')
+    expect(text).toContain('It stays clear of the rails.')
+    expect(story({ heldHigh: 5e-5 }).headline).toBe('The rails stop the growth')
+  })
+
   it('names the slew rate, alone or beside the rails', () => {
     const alone = story({ slewUp: 0.3, slewDown: 0.31 })
     expect(alone.headline).toBe('The slew rate stops the growth')

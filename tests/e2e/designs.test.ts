@@ -119,7 +119,7 @@ describe('changing the list', () => {
     await page.waitForURL('**/start-up')
     await page.getByRole('link', { name: 'Designs', exact: true }).click()
     await page.getByRole('combobox', { name: 'Project' }).selectOption({ label: 'Sounders' })
-    await counted(page, /^1–1 of 1 design/)
+    await counted(page, /^1 of 1 design$/)
     await page.getByRole('button', { name: 'Rename project…' }).click()
     await dialog.getByRole('textbox', { name: /^Name/ }).fill('Echo sounders')
     await dialog.getByRole('button', { name: 'Rename' }).click()

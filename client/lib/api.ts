@@ -45,6 +45,11 @@ export function keepSession(session: Session | null): void {
   current = session && { csrfToken: session.csrfToken, personId: session.person.id }
 }
 
+/** Whether this page works in a session: false once it was signed out of, whatever is still in memory. */
+export function sessionIsKept(): boolean {
+  return current !== null
+}
+
 type Listener = () => void
 const signedOutListeners = new Set<Listener>()
 

@@ -1,10 +1,13 @@
 import { useMutation } from '@tanstack/react-query'
 import { useNavigate } from 'react-router-dom'
 import { useStatus } from '#client/components/ui/status.tsx'
-import { api, ApiError } from '#client/lib/api.ts'
+import { api, ApiError, keepSession } from '#client/lib/api.ts'
 import { problemSentence } from '#client/lib/form-problem.ts'
 
-/** Ends this browser's session, or every session of the person. The sign-in page then empties the cache. */
+/**
+ * Ends this browser's session, or every session of the person. The guard lets nobody back from here on; the sign-in page
+ * then empties the cache.
+ */
 export function useSignOut() {
   const navigate = useNavigate()
   const say = useStatus()
@@ -18,6 +21,7 @@ export function useSignOut() {
       }
     },
     onSuccess: async (_, where) => {
+      keepSession(null)
       await navigate('/sign-in')
       say(where === 'here' ? 'Signed out.' : 'Signed out everywhere.')
     },

@@ -8,6 +8,8 @@ export default defineConfig({
     fileParallelism: false,
     // Only where nobody watches: a try more, which vitest reports. By hand a race fails at once, and is to be mended.
     retry: process.env.CI ? 1 : 0,
+    // A poll waits as long as a locator may need on a busy machine; vitest's own second is too short.
+    expect: { poll: { timeout: 15_000 } },
     testTimeout: 120_000,
     hookTimeout: 120_000,
   },

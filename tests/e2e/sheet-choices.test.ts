@@ -182,7 +182,7 @@ describe('the visible span', () => {
     await drag('End of the visible span', -0.75)
     await expect.poll(() => now('End of the visible span')).toBeCloseTo(0.015, 3)
     await drag('Visible span', 0.5)
-    // How far the window lands is for the strip's own tests: under load the browser merges moves of a fast pointer.
+    // Should land at 0.03. After the other tests of this file it lands short, for a cause not found yet; alone it does not.
     await expect.poll(() => now('Start of the visible span')).toBeGreaterThan(0.01)
     await page.waitForURL(/from=.*to=/)
     const [start, end] = [await now('Start of the visible span'), await now('End of the visible span')]
